@@ -10,6 +10,13 @@ import org.levelgaze.shared.SiteId;
  */
 public record Actor(SiteId site, String who) {
 
+    /** Refuses an empty name. */
+    public Actor {
+        if (who.isBlank()) {
+            throw new IllegalArgumentException("An actor is account:ID, token:ID or system, not nothing");
+        }
+    }
+
     /** The program itself at this site. */
     public static Actor system(SiteId site) {
         return new Actor(site, "system");
