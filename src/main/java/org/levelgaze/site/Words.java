@@ -1,0 +1,47 @@
+package org.levelgaze.site;
+
+import java.util.List;
+import java.util.Locale;
+import org.levelgaze.shared.Refusal;
+import org.levelgaze.shared.RowError;
+import org.springframework.context.MessageSource;
+import org.springframework.context.MessageSourceResolvable;
+import org.springframework.stereotype.Component;
+
+/** The sentences of refusals in the reader's language. */
+@Component
+class Words {
+
+    private final MessageSource messages;
+
+    Words(MessageSource messages) {
+        this.messages = messages;
+    }
+
+    String sentence(Refusal refusal, Locale locale) {
+        return sentence(refusal.messageKey(), refusal.arguments(), locale);
+    }
+
+    String sentence(RowError row, Locale locale) {
+        return sentence(row.message(), row.arguments(), locale);
+    }
+
+    /** What a status means, as a heading. */
+    String title(int status, Locale locale) {
+        return sentence("site.error." + name(status, locale) + ".title", List.of(), locale);
+    }
+
+    /** The status when there are words for it, else {@code other}. */
+    String name(int status, Locale locale) {
+        boolean known = !"".equals(messages.getMessage("site.error." + status + ".title", null, "", locale));
+        return known ? Integer.toString(status) : "other";
+    }
+
+    String sentence(MessageSourceResolvable resolvable, Locale locale) {
+        return messages.getMessage(resolvable, locale);
+    }
+
+    String sentence(String key, List<?> arguments, Locale locale) {
+        return messages.getMessage(key, arguments.toArray(), locale);
+    }
+}

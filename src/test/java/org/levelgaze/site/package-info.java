@@ -1,0 +1,5 @@
+/** Tests of the shell. */
+@NullMarked
+package org.levelgaze.site;
+
+import org.jspecify.annotations.NullMarked;
