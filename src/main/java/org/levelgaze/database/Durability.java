@@ -1,0 +1,39 @@
+package org.levelgaze.database;
+
+import java.sql.Connection;
+import java.sql.ResultSet;
+import java.sql.SQLException;
+import java.sql.Statement;
+import java.util.List;
+
+/** What must be switched on, in the sessions that store, for a commit to outlive a crash. */
+final class Durability {
+
+    static final List<String> SETTINGS = List.of("fsync", "synchronous_commit", "full_page_writes", "data_checksums");
+
+    private Durability() {}
+
+    /** Asks the server and refuses one that could lose what it acknowledged. */
+    static void demand(Connection connection) throws SQLException {
+        for (String setting : SETTINGS) {
+            String value = show(connection, setting);
+            if (!value.equals("on")) {
+                throw new DatabaseRefusal(
+                        "PostgreSQL runs with " + setting + " = " + value + ": it could lose what it has acknowledged.",
+                        "Switch " + setting + " on"
+                                + (setting.equals("data_checksums")
+                                        ? " with pg_checksums while the program is stopped."
+                                        : "; look for it in postgresql.auto.conf and in the settings of roles and"
+                                                + " databases."));
+            }
+        }
+    }
+
+    private static String show(Connection connection, String setting) throws SQLException {
+        try (Statement statement = connection.createStatement();
+                ResultSet answer = statement.executeQuery("show " + setting)) {
+            answer.next();
+            return answer.getString(1);
+        }
+    }
+}
