@@ -1,0 +1,65 @@
+package org.levelgaze.studies.reading;
+
+import java.util.Collections;
+import java.util.LinkedHashSet;
+import java.util.Locale;
+import java.util.Set;
+
+/**
+ * Which words of a file mean what, without regard to case and to blanks around them.
+ *
+ * @param accept words of a call that lets a piece through
+ * @param reject words of a call that holds it back
+ * @param good words of a true state that is good
+ * @param defective words of a true state that is defective
+ */
+public record Words(Set<String> accept, Set<String> reject, Set<String> good, Set<String> defective) {
+
+    private static final Words STANDARD =
+            new Words(Set.of("accept"), Set.of("reject"), ordered("good", "accept"), ordered("defective", "reject"));
+
+    /**
+     * Keeps the words in their plain form.
+     *
+     * @throws IllegalArgumentException when a word would mean both
+     */
+    public Words {
+        accept = plain(accept);
+        reject = plain(reject);
+        good = plain(good);
+        defective = plain(defective);
+        refuseCommon(accept, reject);
+        refuseCommon(good, defective);
+    }
+
+    /** {@code accept} and {@code reject}; {@code good}, {@code defective}, {@code accept} and {@code reject} for the truth. */
+    public static Words standard() {
+        return STANDARD;
+    }
+
+    /** The form in which words are compared. */
+    static String plain(String word) {
+        return word.strip().toLowerCase(Locale.ROOT);
+    }
+
+    private static Set<String> plain(Set<String> words) {
+        Set<String> plain = new LinkedHashSet<>();
+        words.forEach(word -> plain.add(plain(word)));
+        return Collections.unmodifiableSet(plain);
+    }
+
+    private static Set<String> ordered(String first, String second) {
+        Set<String> words = new LinkedHashSet<>();
+        words.add(first);
+        words.add(second);
+        return words;
+    }
+
+    private static void refuseCommon(Set<String> some, Set<String> others) {
+        for (String word : some) {
+            if (others.contains(word)) {
+                throw new IllegalArgumentException("The word '" + word + "' cannot mean both");
+            }
+        }
+    }
+}
