@@ -16,16 +16,19 @@ final class Durability {
     /** Asks the server and refuses one that could lose what it acknowledged. */
     static void demand(Connection connection) throws SQLException {
         for (String setting : SETTINGS) {
-            String value = show(connection, setting);
-            if (!value.equals("on")) {
-                throw new DatabaseRefusal(
-                        "PostgreSQL runs with " + setting + " = " + value + ": it could lose what it has acknowledged.",
-                        "Switch " + setting + " on"
-                                + (setting.equals("data_checksums")
-                                        ? " with pg_checksums while the program is stopped."
-                                        : "; look for it in postgresql.auto.conf and in the settings of roles and"
-                                                + " databases."));
-            }
+            demand(connection, setting);
+        }
+    }
+
+    static void demand(Connection connection, String setting) throws SQLException {
+        String value = show(connection, setting);
+        if (!value.equals("on")) {
+            throw new DatabaseRefusal(
+                    "PostgreSQL runs with " + setting + " = " + value + ": it could lose what it has acknowledged.",
+                    setting.equals("data_checksums")
+                            ? "Switch data_checksums on with pg_checksums while the program is stopped."
+                            : "Switch " + setting
+                                    + " on; look for it in the settings of the server, its roles and its databases.");
         }
     }
 

@@ -109,7 +109,7 @@ final class Server {
                 LOG.info(
                         "The PostgreSQL of an earlier start (process {}) still runs and is stopped first",
                         left.get().pid());
-                commands.run("pg_ctl", List.of("stop", "-m", "fast", "-w", "-t", STOP_SECONDS, "-D", data.toString()));
+                stop(commands, "fast");
             }
             case FOREIGN -> PidFile.in(data).toFile().delete();
             case GONE, UNKNOWN -> {}
@@ -168,20 +168,13 @@ final class Server {
     void stop() {
         stopping = true;
         watch.cancel(false);
-        for (String mode : List.of("fast", "immediate")) {
-            if (process.isAlive()) {
-                commands.run(
-                        "pg_ctl",
-                        List.of(
-                                "stop",
-                                "-m",
-                                mode,
-                                "-w",
-                                "-t",
-                                STOP_SECONDS,
-                                "-D",
-                                commands.home().data() + ""));
-            }
+        if (process.isAlive() && !stop(commands, "fast").succeeded() && process.isAlive()) {
+            stop(commands, "immediate");
         }
+    }
+
+    private static ServerCommands.Outcome stop(ServerCommands commands, String mode) {
+        String data = commands.home().data().toString();
+        return commands.run("pg_ctl", List.of("stop", "-m", mode, "-w", "-t", STOP_SECONDS, "-D", data));
     }
 }
