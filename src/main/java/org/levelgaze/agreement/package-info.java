@@ -5,7 +5,9 @@
  * {@link org.levelgaze.agreement.Study} and gives {@link org.levelgaze.agreement.Findings}; every result type says which
  * method it follows and where that comes from. The types are public because pages, papers and the API show them.
  */
+@ApplicationModule(allowedDependencies = {})
 @NullMarked
 package org.levelgaze.agreement;
 
 import org.jspecify.annotations.NullMarked;
+import org.springframework.modulith.ApplicationModule;

@@ -3,7 +3,9 @@
  *
  * <p>Pure: no framework, no database, no clock, no other module.
  */
+@ApplicationModule(allowedDependencies = {})
 @NullMarked
 package org.levelgaze.plot;
 
 import org.jspecify.annotations.NullMarked;
+import org.springframework.modulith.ApplicationModule;

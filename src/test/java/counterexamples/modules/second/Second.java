@@ -1,0 +1,4 @@
+package counterexamples.modules.second;
+
+/** Anything. */
+public record Second() {}

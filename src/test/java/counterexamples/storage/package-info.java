@@ -1,0 +1,5 @@
+/** Shows others what it stores in. */
+@NullMarked
+package counterexamples.storage;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,7 @@
+package counterexamples.studies.reading;
+
+import org.springframework.stereotype.Component;
+
+/** Is a bean. */
+@Component
+class KnowsAFramework {}

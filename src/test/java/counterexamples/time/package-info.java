@@ -1,0 +1,5 @@
+/** Looks at the machine's clock. */
+@NullMarked
+package counterexamples.time;
+
+import org.jspecify.annotations.NullMarked;

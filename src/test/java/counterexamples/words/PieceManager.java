@@ -1,0 +1,4 @@
+package counterexamples.words;
+
+/** Says nothing about what it does. */
+class PieceManager {}
