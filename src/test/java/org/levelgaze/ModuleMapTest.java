@@ -1,0 +1,62 @@
+package org.levelgaze;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import com.tngtech.archunit.core.domain.JavaPackage;
+import com.tngtech.archunit.core.importer.ClassFileImporter;
+import com.tngtech.archunit.core.importer.ImportOption;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Map;
+import java.util.TreeMap;
+import java.util.regex.Pattern;
+import org.junit.jupiter.api.Test;
+import org.springframework.modulith.ApplicationModule;
+import org.springframework.modulith.core.ApplicationModules;
+import org.springframework.modulith.docs.Documenter;
+
+/** The map that contributors read is the map of the code. */
+class ModuleMapTest {
+
+    private static final Pattern ROW = Pattern.compile("^\\| `(?<module>[a-z]+)` \\| .+ \\| (?<uses>[a-z, ]+) \\|$");
+
+    @Test
+    void theTableInTheContributorsGuideNamesEveryModuleAndItsArrows() throws IOException {
+        Map<String, String> written = new TreeMap<>();
+        Files.readString(Path.of("DEVELOPERS.md")).lines().map(ROW::matcher).forEach(row -> {
+            if (row.matches()) {
+                written.put(row.group("module"), row.group("uses"));
+            }
+        });
+
+        assertThat(written).isEqualTo(inTheCode());
+    }
+
+    @Test
+    void theModulesCanBeDrawn() {
+        new Documenter(ApplicationModules.of(Levelgaze.class)).writeDocumentation();
+
+        assertThat(Path.of("target/spring-modulith-docs/components.puml")).isNotEmptyFile();
+    }
+
+    private static Map<String, String> inTheCode() {
+        Map<String, String> modules = new TreeMap<>();
+        for (JavaPackage each : new ClassFileImporter()
+                .withImportOption(new ImportOption.DoNotIncludeTests())
+                .importPackages("org.levelgaze")
+                .getPackage("org.levelgaze")
+                .getSubpackages()) {
+            modules.put(
+                    each.getRelativeName(),
+                    each.tryGetAnnotationOfType(ApplicationModule.class)
+                            .map(module -> uses(module.allowedDependencies()))
+                            .orElse("everything"));
+        }
+        return modules;
+    }
+
+    private static String uses(String[] modules) {
+        return modules.length == 0 ? "nothing" : String.join(", ", modules);
+    }
+}
