@@ -1,0 +1,31 @@
+package org.levelgaze.register;
+
+import java.util.regex.Pattern;
+import org.levelgaze.shared.Refusal;
+
+/** The rules for codes and names: kept exactly as written, but they must be printable. */
+final class Codes {
+
+    static final int LONGEST_CODE = 100;
+    static final int LONGEST_NAME = 200;
+
+    private static final Pattern CONTROL = Pattern.compile("\\p{Cntrl}");
+
+    private Codes() {}
+
+    static void check(String thing, String code) {
+        if (code.isBlank()
+                || code.length() > LONGEST_CODE
+                || CONTROL.matcher(code).find()) {
+            throw new Refusal(Refusal.Kind.INVALID, "code-not-usable", thing, code, LONGEST_CODE);
+        }
+    }
+
+    static void checkName(String name) {
+        if (name.isBlank()
+                || name.length() > LONGEST_NAME
+                || CONTROL.matcher(name).find()) {
+            throw new Refusal(Refusal.Kind.INVALID, "name-not-usable", name, LONGEST_NAME);
+        }
+    }
+}
