@@ -72,7 +72,7 @@ create table study_call (
     appraiser_no smallint not null,
     kind_no smallint,
     accepted boolean not null,
-    primary key (site_id, study_id, piece_no, appraiser_no, trial),
+    primary key (site_id, study_id, appraiser_no, piece_no, trial),
     foreign key (site_id, study_id, appraiser_no) references study_appraiser,
     foreign key (site_id, study_id, piece_no) references study_piece,
     foreign key (site_id, study_id, kind_no) references study_seen_kind
