@@ -12,7 +12,12 @@ import org.levelgaze.sets.TrueState;
  * @param trueState what was decided
  * @param defectKind the kind of defect; null when good or not said
  */
-record StudyPiece(int number, long pieceId, String label, TrueState trueState, @Nullable String defectKind) {
+record StudyPiece(
+        int number,
+        long pieceId,
+        String label,
+        TrueState trueState,
+        @Nullable String defectKind) {
 
     /** The engine's word for the true state; null when the piece is not scored. */
     org.levelgaze.agreement.@Nullable TrueState scoredAs() {
