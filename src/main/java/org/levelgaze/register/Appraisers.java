@@ -16,12 +16,12 @@ import org.springframework.transaction.annotation.Transactional;
 @Service
 public class Appraisers {
 
-    private final AppraiserStore store;
+    private final AppraiserRows rows;
     private final Journal journal;
     private final Clock clock;
 
-    Appraisers(AppraiserStore store, Journal journal, Clock clock) {
-        this.store = store;
+    Appraisers(AppraiserRows rows, Journal journal, Clock clock) {
+        this.rows = rows;
         this.journal = journal;
         this.clock = clock;
     }
@@ -38,8 +38,8 @@ public class Appraisers {
         if (byCode(actor.site(), code).isPresent()) {
             throw new Refusal(Refusal.Kind.CONFLICT, "appraiser-exists", code);
         }
-        Appraiser created = store.save(new AppraiserEntity(actor.site(), code, name, kind, clock.instant()))
-                .toAppraiser();
+        long id = rows.insert(actor.site(), code, name, kind, clock.instant());
+        Appraiser created = new Appraiser(actor.site(), id, code, name, kind, List.of());
         journal.record(actor, Act.of("appraiser.created", "appraiser:" + created.id(), created.toString()));
         return created;
     }
@@ -53,9 +53,8 @@ public class Appraisers {
      */
     @Transactional
     public Appraiser addConfiguration(Actor actor, String code, String label, Instant changedAt, String note) {
-        AppraiserEntity entity = store.findBySiteIdAndCode(actor.site().value(), code)
+        Appraiser camera = byCode(actor.site(), code)
                 .orElseThrow(() -> new Refusal(Refusal.Kind.NOT_FOUND, "unknown-appraiser", code));
-        Appraiser camera = entity.toAppraiser();
         Instant now = clock.instant();
         Codes.checkName(label);
         if (camera.kind() != AppraiserKind.CAMERA) {
@@ -67,8 +66,8 @@ public class Appraisers {
         if (camera.configuration(label).isPresent()) {
             throw new Refusal(Refusal.Kind.CONFLICT, "configuration-exists", label, code);
         }
-        entity.addConfiguration(label, changedAt, note, now);
-        Appraiser changed = store.save(entity).toAppraiser();
+        rows.insertConfiguration(actor.site(), camera.id(), label, changedAt, note, now);
+        Appraiser changed = get(actor.site(), camera.id());
         journal.record(
                 actor,
                 Act.of(
@@ -79,17 +78,13 @@ public class Appraisers {
     }
 
     /** The appraiser with this code, if there is one. */
-    @Transactional(readOnly = true)
     public Optional<Appraiser> byCode(SiteId site, String code) {
-        return store.findBySiteIdAndCode(site.value(), code).map(AppraiserEntity::toAppraiser);
+        return rows.byCode(site, code);
     }
 
     /** All appraisers with exactly this name; several people may share one. */
-    @Transactional(readOnly = true)
     public List<Appraiser> byName(SiteId site, String name) {
-        return store.findBySiteIdAndName(site.value(), name).stream()
-                .map(AppraiserEntity::toAppraiser)
-                .toList();
+        return rows.byName(site, name);
     }
 
     /**
@@ -97,18 +92,12 @@ public class Appraisers {
      *
      * @throws IllegalArgumentException when there is none
      */
-    @Transactional(readOnly = true)
     public Appraiser get(SiteId site, long id) {
-        return store.findBySiteIdAndId(site.value(), id)
-                .map(AppraiserEntity::toAppraiser)
-                .orElseThrow(() -> new IllegalArgumentException("No appraiser has the number " + id));
+        return rows.byId(site, id).orElseThrow(() -> new IllegalArgumentException("No appraiser has the number " + id));
     }
 
     /** All appraisers of the site, in the order of their codes. */
-    @Transactional(readOnly = true)
     public List<Appraiser> all(SiteId site) {
-        return store.findBySiteIdOrderByCode(site.value()).stream()
-                .map(AppraiserEntity::toAppraiser)
-                .toList();
+        return rows.all(site);
     }
 }

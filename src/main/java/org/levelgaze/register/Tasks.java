@@ -18,12 +18,12 @@ import org.springframework.transaction.annotation.Transactional;
 @Service
 public class Tasks {
 
-    private final TaskStore store;
+    private final TaskRows rows;
     private final Journal journal;
     private final Clock clock;
 
-    Tasks(TaskStore store, Journal journal, Clock clock) {
-        this.store = store;
+    Tasks(TaskRows rows, Journal journal, Clock clock) {
+        this.rows = rows;
         this.journal = journal;
         this.clock = clock;
     }
@@ -40,9 +40,10 @@ public class Tasks {
         if (byCode(actor.site(), code).isPresent()) {
             throw new Refusal(Refusal.Kind.CONFLICT, "task-exists", code);
         }
-        TaskEntity task = new TaskEntity(actor.site(), code, name, clock.instant());
-        addAll(task, new HashSet<>(), defectKinds);
-        Task created = store.save(task).toTask();
+        refuseTwice(defectKinds);
+        long id = rows.insert(actor.site(), code, name, clock.instant());
+        defectKinds.forEach(kind -> rows.addKind(actor.site(), id, kind));
+        Task created = new Task(actor.site(), id, code, name, defectKinds);
         journal.record(actor, Act.of("task.created", "task:" + created.id(), created.toString()));
         return created;
     }
@@ -54,28 +55,22 @@ public class Tasks {
      */
     @Transactional
     public Task addUnrated(Actor actor, Task task, Collection<String> codes) {
-        TaskEntity entity = store.findBySiteIdAndId(task.site().value(), task.id())
-                .orElseThrow(() -> new IllegalArgumentException("No task has the number " + task.id()));
-        Set<String> known = new HashSet<>();
-        entity.toTask().defectKinds().forEach(kind -> known.add(kind.code()));
         List<DefectKind> added = codes.stream()
                 .distinct()
-                .filter(code -> !known.contains(code))
+                .filter(code -> task.defectKind(code).isEmpty())
                 .map(code -> new DefectKind(code, code, null))
                 .toList();
         if (added.isEmpty()) {
-            return entity.toTask();
+            return task;
         }
-        addAll(entity, known, added);
-        store.save(entity);
+        added.forEach(kind -> rows.addKind(task.site(), task.id(), kind));
         journal.record(actor, Act.of("task.defect-kinds-added", "task:" + task.id(), added.toString()));
-        return entity.toTask();
+        return get(task.site(), task.id());
     }
 
     /** The task with this code, if there is one. */
-    @Transactional(readOnly = true)
     public Optional<Task> byCode(SiteId site, String code) {
-        return store.findBySiteIdAndCode(site.value(), code).map(TaskEntity::toTask);
+        return rows.byCode(site, code);
     }
 
     /**
@@ -83,27 +78,21 @@ public class Tasks {
      *
      * @throws IllegalArgumentException when there is none
      */
-    @Transactional(readOnly = true)
     public Task get(SiteId site, long id) {
-        return store.findBySiteIdAndId(site.value(), id)
-                .map(TaskEntity::toTask)
-                .orElseThrow(() -> new IllegalArgumentException("No task has the number " + id));
+        return rows.byId(site, id).orElseThrow(() -> new IllegalArgumentException("No task has the number " + id));
     }
 
     /** All tasks of the site, in the order of their codes. */
-    @Transactional(readOnly = true)
     public List<Task> all(SiteId site) {
-        return store.findBySiteIdOrderByCode(site.value()).stream()
-                .map(TaskEntity::toTask)
-                .toList();
+        return rows.all(site);
     }
 
-    private static void addAll(TaskEntity task, Set<String> known, List<DefectKind> kinds) {
+    private static void refuseTwice(List<DefectKind> kinds) {
+        Set<String> known = new HashSet<>();
         for (DefectKind kind : kinds) {
             if (!known.add(kind.code())) {
                 throw new Refusal(Refusal.Kind.INVALID, "defect-kind-twice", kind.code());
             }
-            task.add(kind);
         }
     }
 }

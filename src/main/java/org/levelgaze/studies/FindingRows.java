@@ -56,14 +56,11 @@ class FindingRows {
         for (StudyHead.Participant one : study.appraisers()) {
             values.add(figure(study, engine, one, findings.appraisers().get(one.number())));
         }
-        template.batchUpdate(
-                """
+        template.batchUpdate("""
                 insert into appraiser_figure (site_id, study_id, edition_no, engine_version, appraiser_id,
                         right_pieces, complete_pieces, false_accepts, calls_on_defective, false_rejects, calls_on_good,
                         bias_ratio, bias_status, criterion_c, criterion_c_low, criterion_c_high)
-                values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)""",
-                values,
-                FIGURE_TYPES);
+                values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)""", values, FIGURE_TYPES);
     }
 
     private static @Nullable Object[] figure(

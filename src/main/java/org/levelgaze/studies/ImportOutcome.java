@@ -25,8 +25,7 @@ public sealed interface ImportOutcome {
             boolean unknownSet,
             List<String> unknownAppraisers,
             List<String> unknownKinds,
-            @Nullable Long duplicateOf)
-            implements ImportOutcome {
+            @Nullable Long duplicateOf) implements ImportOutcome {
 
         /** Keeps its own copies of the lists. */
         public Asked {

@@ -118,7 +118,8 @@ class Participants {
         List<CameraConfiguration> inOrder = camera.configurations();
         int next = inOrder.indexOf(configuration) + 1;
         boolean startedBefore = configuration.changedAt().isBefore(ends);
-        boolean replacedBefore = next < inOrder.size() && !inOrder.get(next).changedAt().isAfter(begins);
+        boolean replacedBefore =
+                next < inOrder.size() && !inOrder.get(next).changedAt().isAfter(begins);
         return startedBefore && !replacedBefore;
     }
 }

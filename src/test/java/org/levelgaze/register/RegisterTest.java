@@ -103,9 +103,7 @@ class RegisterTest {
         assertThatThrownBy(() -> jdbc.sql("""
                         insert into camera_configuration (site_id, appraiser_id, configuration_no, label, changed_at,
                                                           recorded_at)
-                        values (1, :id, 1, 'x', now(), now())""")
-                        .param("id", person.id())
-                        .update())
+                        values (1, :id, 1, 'x', now(), now())""").param("id", person.id()).update())
                 .isInstanceOf(DataIntegrityViolationException.class);
     }
 
@@ -123,11 +121,10 @@ class RegisterTest {
     void journalsWhatWasEntered() {
         Task task = tasks.create(SYSTEM, "REG-JOURNAL", "Journalled", List.of());
 
-        assertThat(journal.before(SiteId.MAIN, Long.MAX_VALUE, 50))
-                .anySatisfy(entry -> {
-                    assertThat(entry.act()).isEqualTo("task.created");
-                    assertThat(entry.subject()).isEqualTo("task:" + task.id());
-                });
+        assertThat(journal.before(SiteId.MAIN, Long.MAX_VALUE, 50)).anySatisfy(entry -> {
+            assertThat(entry.act()).isEqualTo("task.created");
+            assertThat(entry.subject()).isEqualTo("task:" + task.id());
+        });
         assertThat(journal.verify(SiteId.MAIN).intact()).isTrue();
     }
 }

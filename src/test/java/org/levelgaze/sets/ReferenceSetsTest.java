@@ -111,8 +111,7 @@ class ReferenceSetsTest {
         assertRefused("good-piece-with-defect", () -> new NewPiece("G-2", TrueState.GOOD, "CRACK", null));
         assertRefused(
                 "unknown-defect-kind",
-                () -> sets.create(
-                        HOLDER, task, newSet("S-5", new NewPiece("D-2", TrueState.DEFECTIVE, "DENT", null))));
+                () -> sets.create(HOLDER, task, newSet("S-5", new NewPiece("D-2", TrueState.DEFECTIVE, "DENT", null))));
         assertThat(sets.byCode(SiteId.MAIN, "S-5")).isEmpty();
     }
 
@@ -127,8 +126,10 @@ class ReferenceSetsTest {
     void neverLetsTheProgramChangeATrueState() {
         sets.create(HOLDER, task, newSet("S-7", GOOD, CRACKED));
 
-        assertThatThrownBy(() -> jdbc.sql("update edition_piece set true_state = 'good'").update())
+        assertThatThrownBy(() ->
+                        jdbc.sql("update edition_piece set true_state = 'good'").update())
                 .isInstanceOf(DataAccessException.class)
+                .rootCause()
                 .hasMessageContaining("permission denied");
     }
 
@@ -138,7 +139,7 @@ class ReferenceSetsTest {
 
     private static void assertRefused(String type, org.assertj.core.api.ThrowableAssert.ThrowingCallable act) {
         assertThatThrownBy(act)
-                .isInstanceOfSatisfying(Refusal.class, refusal -> assertThat(refusal.type())
-                        .isEqualTo(type));
+                .isInstanceOfSatisfying(
+                        Refusal.class, refusal -> assertThat(refusal.type()).isEqualTo(type));
     }
 }
