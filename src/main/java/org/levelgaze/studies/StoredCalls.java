@@ -102,7 +102,7 @@ class StoredCalls {
         int trial = row.getInt("trial");
         String calls = row.getString("calls");
         Integer[] pieces = integers(row.getArray("pieces"));
-        Short[] kinds = shorts(row.getArray("kinds"));
+        Integer[] kinds = integers(row.getArray("kinds"));
         for (int i = 0; i < calls.length(); i++) {
             int piece = pieces == null ? i : pieces[i];
             visitor.call(piece, appraiser, trial, calls.charAt(i) == 'A', kinds == null ? -1 : kinds[i]);
@@ -111,9 +111,5 @@ class StoredCalls {
 
     private static Integer @Nullable [] integers(@Nullable Array array) throws SQLException {
         return array == null ? null : (Integer[]) array.getArray();
-    }
-
-    private static Short @Nullable [] shorts(@Nullable Array array) throws SQLException {
-        return array == null ? null : (Short[]) array.getArray();
     }
 }

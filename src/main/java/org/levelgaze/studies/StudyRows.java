@@ -6,11 +6,14 @@ import java.sql.SQLException;
 import java.sql.Timestamp;
 import java.sql.Types;
 import java.time.Instant;
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.jspecify.annotations.Nullable;
+import org.levelgaze.sets.ReferenceSet;
 import org.levelgaze.shared.SiteId;
 import org.springframework.jdbc.core.JdbcTemplate;
 import org.springframework.jdbc.core.simple.JdbcClient;
@@ -73,6 +76,23 @@ class StudyRows {
                 .param("digest", fileDigest)
                 .query(Integer.class)
                 .single();
+    }
+
+    /** The first study that these bytes made for this set and day; null: none. */
+    @Nullable
+    Long sameBytes(ReferenceSet set, LocalDate performedOn, byte[] fileDigest) {
+        return jdbc.sql("""
+                select min(study_id) from study
+                 where site_id = :site and task_id = :task and set_id = :set and performed_on = :day
+                   and file_digest = :digest""")
+                .param("site", set.site().value())
+                .param("task", set.taskId())
+                .param("set", set.id())
+                .param("day", performedOn)
+                .param("digest", fileDigest)
+                .query(Long.class)
+                .optional()
+                .orElse(null);
     }
 
     void insert(StudyHead study, byte[] fileDigest, int repeat, String who) {
@@ -144,6 +164,16 @@ class StudyRows {
                 .param("at", Timestamp.from(at))
                 .param("who", who)
                 .update();
+    }
+
+    /** The pieces that a study names, in the order of the file. */
+    List<Long> pieceIds(StudyHead study) {
+        return jdbc.sql("""
+                select piece_id from study_piece where site_id = :site and study_id = :study order by piece_no""")
+                .param("site", study.site().value())
+                .param("study", study.id())
+                .query(Long.class)
+                .list();
     }
 
     Optional<StudyHead> byId(SiteId site, long id) {

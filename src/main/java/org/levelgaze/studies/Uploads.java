@@ -94,7 +94,7 @@ class Uploads {
     }
 
     Refusal tooLarge() {
-        return new Refusal(Refusal.Kind.TOO_LARGE, "file-too-large", largest.toMegabytes());
+        return new Refusal(Refusal.Kind.TOO_LARGE, "upload-too-large", largest.toMegabytes());
     }
 
     /** The upload, if this actor brought it. */

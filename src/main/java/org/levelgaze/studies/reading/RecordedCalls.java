@@ -97,7 +97,7 @@ public final class RecordedCalls {
         if (!hasTruths()) {
             throw new IllegalStateException("The file does not say what its pieces really are");
         }
-        return study(pieces.stream().map(RecordedCalls::piece).toList());
+        return study(pieces.stream().map(RecordedCalls::piece).toList(), appraisers);
     }
 
     /**
@@ -107,21 +107,31 @@ public final class RecordedCalls {
      *     scored, and its calls are left out
      */
     public Study toStudy(Function<String, @Nullable Piece> known) {
-        return study(pieces.stream().map(piece -> known.apply(piece.label())).toList());
+        return study(pieces.stream().map(piece -> known.apply(piece.label())).toList(), appraisers);
+    }
+
+    /**
+     * The study with true states and codes known from elsewhere.
+     *
+     * @param truths by place: the piece with its true state, or {@code null} when it is undecided; such a piece is not scored
+     * @param codes by place: the code of the appraiser whom the file's word means
+     */
+    public Study toStudy(List<@Nullable Piece> truths, List<String> codes) {
+        return study(truths, codes);
     }
 
     private static @Nullable Piece piece(RecordedPiece piece) {
         return piece.truth() == null ? null : new Piece(piece.label(), piece.truth(), piece.defectKind());
     }
 
-    private Study study(List<@Nullable Piece> truths) {
+    private Study study(List<@Nullable Piece> truths, List<String> codes) {
         StudyBuilder builder = Study.builder(calls.size());
         int[] places = new int[truths.size()];
         for (int at = 0; at < places.length; at++) {
             Piece piece = truths.get(at);
             places[at] = piece == null ? -1 : builder.piece(piece.label(), piece.truth(), piece.defectKind());
         }
-        appraisers.forEach(builder::appraiser);
+        codes.forEach(builder::appraiser);
         int[] seenKinds = kinds.stream().mapToInt(builder::kind).toArray();
         calls.forEach((int piece, int appraiser, int trial, Call call, int seen) -> {
             if (places[piece] >= 0) {

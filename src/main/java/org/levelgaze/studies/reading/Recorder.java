@@ -170,7 +170,7 @@ final class Recorder {
         int place = 0;
         for (String label : labels.keySet()) {
             KnownPiece piece = pieces.get(place++);
-            recorded.add(new RecordedPiece(label, piece.truth, piece.defect));
+            recorded.add(new RecordedPiece(label, piece.truth, piece.defect, piece.row));
         }
         return new RecordedCalls(recorded, List.copyOf(appraisers.keySet()), kindNames, calls, facts);
     }

@@ -1,0 +1,123 @@
+package org.levelgaze.studies;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.Optional;
+import java.util.function.Function;
+import java.util.stream.Collectors;
+import java.util.stream.IntStream;
+import org.jspecify.annotations.Nullable;
+import org.levelgaze.agreement.Findings;
+import org.levelgaze.agreement.Study;
+import org.levelgaze.journal.Actor;
+import org.levelgaze.register.Appraisers;
+import org.levelgaze.sets.EditionPiece;
+import org.levelgaze.sets.ReferenceSet;
+import org.levelgaze.sets.ReferenceSets;
+import org.levelgaze.shared.Refusal;
+import org.levelgaze.shared.SiteId;
+import org.springframework.stereotype.Service;
+import org.springframework.transaction.annotation.Transactional;
+
+/** Stored studies and what they show. */
+@Service
+public class Studies {
+
+    private final StudyRows rows;
+    private final StoredCalls calls;
+    private final FindingRows findings;
+    private final Conclusions conclusions;
+    private final ReferenceSets sets;
+    private final Appraisers appraisers;
+
+    Studies(
+            StudyRows rows,
+            StoredCalls calls,
+            FindingRows findings,
+            Conclusions conclusions,
+            ReferenceSets sets,
+            Appraisers appraisers) {
+        this.rows = rows;
+        this.calls = calls;
+        this.findings = findings;
+        this.conclusions = conclusions;
+        this.sets = sets;
+        this.appraisers = appraisers;
+    }
+
+    /**
+     * The study with this number.
+     *
+     * @throws Refusal when there is none
+     */
+    public StudyHead get(SiteId site, long id) {
+        return rows.byId(site, id)
+                .orElseThrow(() -> new Refusal(Refusal.Kind.NOT_FOUND, "unknown-study", Long.toString(id)));
+    }
+
+    /** A page of studies, the latest day first. */
+    public List<StudyHead> page(SiteId site, StudyFilter filter, int offset, int limit) {
+        return rows.page(site, filter, offset, limit);
+    }
+
+    /** How many studies the filter lets through. */
+    public int count(SiteId site, StudyFilter filter) {
+        return rows.count(site, filter);
+    }
+
+    /** What a concluded study shows; empty before its conclusion. */
+    public Optional<Findings> findings(StudyHead study) {
+        return findings.newest(study.site(), study.id()).map(stored -> FindingsJson.read(stored.json()));
+    }
+
+    /** The same as JSON, to the letter as it was stored. */
+    public Optional<String> findingsJson(StudyHead study) {
+        return findings.newest(study.site(), study.id()).map(FindingRows.StoredFinding::json);
+    }
+
+    /** What the studies showed of one appraiser, the earliest first. */
+    public List<Figure> figures(SiteId site, long appraiserId, @Nullable Long taskId) {
+        return findings.figures(site, appraiserId, taskId);
+    }
+
+    /**
+     * Concludes a study that was stored open.
+     *
+     * @throws Refusal when it is concluded already
+     */
+    @Transactional
+    public void conclude(Actor actor, StudyHead study) {
+        if (study.concluded()) {
+            throw new Refusal(Refusal.Kind.CONFLICT, "study-concluded-already", Long.toString(study.id()));
+        }
+        conclusions.conclude(actor, study, forEngine(study));
+    }
+
+    /** The study as the engine takes it, from the store; for computing, never for showing to an appraiser. */
+    public Study forEngine(StudyHead study) {
+        return calls.read(study, pieces(study), codes(study));
+    }
+
+    /** The pieces that the study names, with what its edition says of them, for computing. */
+    List<StudyPiece> pieces(StudyHead study) {
+        ReferenceSet set = sets.get(study.site(), study.setId());
+        Map<Long, EditionPiece> edition = sets.piecesForScoring(set, study.edition()).stream()
+                .collect(Collectors.toMap(EditionPiece::id, Function.identity()));
+        List<Long> ids = rows.pieceIds(study);
+        return IntStream.range(0, ids.size())
+                .mapToObj(number -> piece(number, Objects.requireNonNull(edition.get(ids.get(number)))))
+                .toList();
+    }
+
+    private static StudyPiece piece(int number, EditionPiece piece) {
+        return new StudyPiece(number, piece.id(), piece.label(), piece.trueState(), piece.defectKind());
+    }
+
+    /** The appraisers' codes in the order of the study. */
+    List<String> codes(StudyHead study) {
+        return study.appraisers().stream()
+                .map(one -> appraisers.get(study.site(), one.appraiserId()).code())
+                .toList();
+    }
+}

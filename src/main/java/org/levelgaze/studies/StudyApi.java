@@ -1,0 +1,185 @@
+package org.levelgaze.studies;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.net.URI;
+import java.time.Instant;
+import java.time.LocalDate;
+import java.util.ArrayList;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+import org.levelgaze.journal.Actor;
+import org.levelgaze.register.Appraisers;
+import org.levelgaze.register.Tasks;
+import org.levelgaze.sets.ReferenceSets;
+import org.levelgaze.shared.Listing;
+import org.levelgaze.shared.Refusal;
+import org.levelgaze.studies.reading.CallReader;
+import org.levelgaze.studies.reading.Reading;
+import org.levelgaze.studies.reading.RecordedCalls;
+import org.levelgaze.studies.reading.Watcher;
+import org.springframework.http.MediaType;
+import org.springframework.http.ResponseEntity;
+import org.springframework.web.bind.annotation.GetMapping;
+import org.springframework.web.bind.annotation.PathVariable;
+import org.springframework.web.bind.annotation.PostMapping;
+import org.springframework.web.bind.annotation.RequestMapping;
+import org.springframework.web.bind.annotation.RequestParam;
+import org.springframework.web.bind.annotation.RestController;
+
+/** Studies over the API. */
+@RestController
+@RequestMapping("/api/v1/studies")
+class StudyApi {
+
+    private final StudyImport imports;
+    private final Studies studies;
+    private final Tasks tasks;
+    private final ReferenceSets sets;
+    private final Appraisers appraisers;
+
+    StudyApi(StudyImport imports, Studies studies, Tasks tasks, ReferenceSets sets, Appraisers appraisers) {
+        this.imports = imports;
+        this.studies = studies;
+        this.tasks = tasks;
+        this.sets = sets;
+        this.appraisers = appraisers;
+    }
+
+    /** Who took part: {@code configuration} is the label that the study names, null when it names none. */
+    record ParticipantAnswer(String appraiser, @Nullable String configuration, int trials) {}
+
+    record StudyAnswer(
+            long id,
+            String task,
+            String set,
+            int edition,
+            LocalDate performedOn,
+            int pieces,
+            long calls,
+            long callsMissing,
+            Instant recordedAt,
+            @Nullable Instant concludedAt,
+            List<ParticipantAnswer> appraisers,
+            List<String> notes) {}
+
+    @PostMapping(consumes = {"text/csv", MediaType.TEXT_PLAIN_VALUE, MediaType.APPLICATION_OCTET_STREAM_VALUE})
+    ResponseEntity<StudyAnswer> create(
+            Actor actor,
+            @RequestParam String task,
+            @RequestParam String set,
+            @RequestParam LocalDate performedOn,
+            @RequestParam(required = false) @Nullable String configuration,
+            @RequestParam(defaultValue = "true") boolean conclude,
+            @RequestParam(defaultValue = "false") boolean create,
+            InputStream body)
+            throws IOException {
+        Consent consent = create ? Consent.EVERYTHING_NEW : Consent.NOTHING;
+        StudyRequest request = new StudyRequest(task, set, performedOn, configuration, conclude, "", consent);
+        StudyHead stored = stored(request, imports.take(actor, request, read(body), Watcher.NONE));
+        return ResponseEntity.created(URI.create("/api/v1/studies/" + stored.id()))
+                .body(answer(studies.get(actor.site(), stored.id())));
+    }
+
+    @GetMapping
+    Listing<StudyAnswer> list(
+            Actor actor,
+            @RequestParam(required = false) @Nullable String task,
+            @RequestParam(required = false) @Nullable String after,
+            @RequestParam(defaultValue = "100") int limit) {
+        Long taskId = task == null ? null : taskId(actor, task);
+        int from = after == null ? 0 : Integer.parseInt(after);
+        int size = Math.max(1, Math.min(limit, Listing.LARGEST_PAGE));
+        StudyFilter filter = new StudyFilter(taskId, null, null, null, null);
+        List<StudyAnswer> page = studies.page(actor.site(), filter, from, size + 1).stream()
+                .map(this::answer)
+                .toList();
+        boolean more = page.size() > size;
+        return new Listing<>(more ? page.subList(0, size) : page, more ? Integer.toString(from + size) : null);
+    }
+
+    @GetMapping("/{id}")
+    StudyAnswer read(Actor actor, @PathVariable long id) {
+        return answer(studies.get(actor.site(), id));
+    }
+
+    /** The findings to the letter as they were stored. */
+    @GetMapping(path = "/{id}/findings", produces = MediaType.APPLICATION_JSON_VALUE)
+    String findings(Actor actor, @PathVariable long id) {
+        return studies.findingsJson(studies.get(actor.site(), id))
+                .orElseThrow(() -> new Refusal(Refusal.Kind.CONFLICT, "study-not-concluded", Long.toString(id)));
+    }
+
+    private long taskId(Actor actor, String code) {
+        return tasks.byCode(actor.site(), code)
+                .orElseThrow(() -> new Refusal(Refusal.Kind.NOT_FOUND, "unknown-task", code))
+                .id();
+    }
+
+    private static RecordedCalls read(InputStream body) throws IOException {
+        Reading reading = CallReader.standard().read(body);
+        if (reading instanceof Reading.Refused refused) {
+            throw new Refusal(
+                    Refusal.Kind.INVALID,
+                    "bad-rows",
+                    List.of(Long.toString(refused.inAll())),
+                    refused.first(),
+                    refused.inAll());
+        }
+        return ((Reading.Read) reading).calls();
+    }
+
+    /** Over the API nobody can be asked: what a page would ask is refused here. */
+    private static StudyHead stored(StudyRequest request, ImportOutcome outcome) {
+        if (outcome instanceof ImportOutcome.Stored done) {
+            return done.study();
+        }
+        ImportOutcome.Asked asked = (ImportOutcome.Asked) outcome;
+        if (asked.duplicateOf() != null) {
+            throw new Refusal(
+                    Refusal.Kind.CONFLICT,
+                    "duplicate-study",
+                    request.performedOn().toString());
+        }
+        if (asked.unknownSet()) {
+            throw new Refusal(Refusal.Kind.INVALID, "unknown-set", request.set());
+        }
+        if (!asked.unknownAppraisers().isEmpty()) {
+            String words = String.join(", ", asked.unknownAppraisers());
+            throw new Refusal(Refusal.Kind.INVALID, "unknown-appraisers", words);
+        }
+        throw new Refusal(
+                Refusal.Kind.INVALID, "unknown-defect-kinds", String.join(", ", asked.unknownKinds()), request.task());
+    }
+
+    private StudyAnswer answer(StudyHead study) {
+        List<ParticipantAnswer> taking = new ArrayList<>();
+        study.appraisers().forEach(one -> taking.add(participant(study, one)));
+        return new StudyAnswer(
+                study.id(),
+                tasks.get(study.site(), study.taskId()).code(),
+                sets.get(study.site(), study.setId()).code(),
+                study.edition(),
+                study.performedOn(),
+                study.pieces(),
+                study.calls(),
+                study.callsMissing(),
+                study.recordedAt(),
+                study.concludedAt(),
+                taking,
+                study.callsMissing() == 0 ? List.of() : List.of(study.callsMissing() + " calls missing in the file"));
+    }
+
+    private ParticipantAnswer participant(StudyHead study, StudyHead.Participant one) {
+        var appraiser = appraisers.get(study.site(), one.appraiserId());
+        Integer number = one.configuration();
+        String label = number == null
+                ? null
+                : appraiser.configurations().stream()
+                        .filter(configuration -> configuration.number() == number)
+                        .findFirst()
+                        .orElseThrow()
+                        .label();
+        return new ParticipantAnswer(appraiser.code(), label, one.trials());
+    }
+}
