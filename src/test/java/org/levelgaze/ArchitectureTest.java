@@ -75,7 +75,7 @@ class ArchitectureTest {
     static Stream<Arguments> ofTheProgram() {
         return Stream.of(
                 rule("a pure engine", ArchitectureRules::agreementIsPure, "StringUtils", "words.Mutable"),
-                rule("pure pictures", ArchitectureRules::plotIsPure, "java.sql.Connection"),
+                rule("pure pictures", ArchitectureRules::plotIsPure, "java.sql.Connection", "java.time.Clock"),
                 rule("pure reading", ArchitectureRules::readingIsPure, "stereotype.Component"),
                 rule("entities of its modules' own", ArchitectureRules::entitiesAreNotPublic, "PublicEntity"),
                 rule("repositories of its modules' own", ArchitectureRules::repositoriesAreNotPublic, "PublicStore"),
