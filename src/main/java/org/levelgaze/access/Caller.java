@@ -11,10 +11,7 @@ import org.springframework.security.authentication.AbstractAuthenticationToken;
 import org.springframework.security.core.GrantedAuthority;
 import org.springframework.security.core.authority.AuthorityUtils;
 
-/**
- * Whoever sent a request: a person who is signed in, or a token. Its {@code getName()} is the actor's: {@code account:7} or
- * {@code token:3}.
- */
+/** Whoever sent a request: a person who is signed in, or a program with a token. */
 public final class Caller extends AbstractAuthenticationToken {
 
     private static final long serialVersionUID = 1L;
@@ -67,14 +64,15 @@ public final class Caller extends AbstractAuthenticationToken {
         return actor;
     }
 
-    /** The person's name on screen, or what the token is called. */
-    public String displayName() {
-        return displayName;
-    }
-
     /** Whether this is a person in a browser, not a program with a token. */
     public boolean isPerson() {
         return getAuthorities().stream().anyMatch(right -> "ROLE_PERSON".equals(right.getAuthority()));
+    }
+
+    /** The person's name on screen, or what the token is called. */
+    @Override
+    public String getName() {
+        return displayName;
     }
 
     @Override

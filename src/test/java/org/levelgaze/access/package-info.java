@@ -1,0 +1,5 @@
+/** Tests of accounts, roles, tokens and sign-in. */
+@NullMarked
+package org.levelgaze.access;
+
+import org.jspecify.annotations.NullMarked;
