@@ -27,6 +27,7 @@ import java.time.ZoneId;
 import java.util.Date;
 import java.util.List;
 import java.util.TimeZone;
+import java.util.stream.Stream;
 import org.jspecify.annotations.NullMarked;
 import org.junit.platform.commons.annotation.Testable;
 import org.springframework.data.repository.Repository;
@@ -154,11 +155,19 @@ record ArchitectureRules(String root) {
     ArchRule nothingHasSetters() {
         return noMethods()
                 .that(DescribedPredicate.describe(
-                        "take one value",
-                        (JavaMethod method) -> method.getRawParameterTypes().size() == 1))
+                        "take one value and are not asked for by a class of others",
+                        (JavaMethod method) -> method.getRawParameterTypes().size() == 1 && !isInherited(method)))
                 .should()
                 .haveNameMatching("set[A-Z].*")
                 .because("what changes has a name of its own, and checks whether it may");
+    }
+
+    private static boolean isInherited(JavaMethod method) {
+        return Stream.concat(
+                        method.getOwner().getAllRawSuperclasses().stream(),
+                        method.getOwner().getAllRawInterfaces().stream())
+                .flatMap(type -> type.getMethods().stream())
+                .anyMatch(other -> other.getName().equals(method.getName()));
     }
 
     /** A name says what is inside. */
