@@ -6,6 +6,7 @@ import java.sql.Timestamp;
 import java.sql.Types;
 import java.time.Instant;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
@@ -102,6 +103,37 @@ class FindingRows {
                         row.getString("findings"),
                         row.getTimestamp("computed_at").toInstant()))
                 .optional();
+    }
+
+    /** Whether the figures beside stored findings are the ones that follow from them. */
+    boolean figuresAgree(StudyHead study, StoredFinding stored, Findings findings) {
+        List<String> expected = study.appraisers().stream()
+                .map(one -> Arrays.toString(figure(
+                        study, stored.engine(), one, findings.appraisers().get(one.number()))))
+                .sorted()
+                .toList();
+        List<String> present = jdbc.sql("""
+                select site_id, study_id, edition_no, engine_version, appraiser_id,
+                       right_pieces::bigint, complete_pieces::bigint, false_accepts::bigint, calls_on_defective::bigint,
+                       false_rejects::bigint, calls_on_good::bigint,
+                       bias_ratio, bias_status, criterion_c, criterion_c_low, criterion_c_high
+                  from appraiser_figure
+                 where site_id = :site and study_id = :study and edition_no = :edition and engine_version = :engine""")
+                .param("site", study.site().value())
+                .param("study", study.id())
+                .param("edition", stored.edition())
+                .param("engine", stored.engine())
+                .query((row, number) -> asText(row))
+                .list();
+        return present.stream().sorted().toList().equals(expected);
+    }
+
+    private static String asText(ResultSet row) throws SQLException {
+        Object[] values = new Object[FIGURE_TYPES.length];
+        for (int i = 0; i < values.length; i++) {
+            values[i] = row.getObject(i + 1);
+        }
+        return Arrays.toString(values);
     }
 
     /** The figures of one appraiser, the earliest day first. */

@@ -56,6 +56,15 @@ class StoredCalls {
                 .query(eachPass);
     }
 
+    /** How many calls are stored. */
+    long count(StudyHead study) {
+        return jdbc.sql("select count(*) from study_call where site_id = :site and study_id = :study")
+                .param("site", study.site().value())
+                .param("study", study.id())
+                .query(Long.class)
+                .single();
+    }
+
     /** The words with which defects were named, in the order of their numbers. */
     List<String> seenKinds(SiteId site, long study) {
         return jdbc.sql("""

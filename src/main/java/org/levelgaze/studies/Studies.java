@@ -99,6 +99,11 @@ public class Studies {
         return calls.read(study, pieces(study), codes(study));
     }
 
+    /** How many calls are really stored. */
+    long storedCalls(StudyHead study) {
+        return calls.count(study);
+    }
+
     /** The pieces that the study names, with what its edition says of them, for computing. */
     List<StudyPiece> pieces(StudyHead study) {
         ReferenceSet set = sets.get(study.site(), study.setId());

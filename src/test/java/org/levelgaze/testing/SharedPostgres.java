@@ -4,6 +4,7 @@ import io.zonky.test.db.postgres.embedded.EmbeddedPostgres;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.sql.Connection;
+import java.sql.DriverManager;
 import java.sql.SQLException;
 import java.sql.Statement;
 import java.util.Map;
@@ -41,6 +42,11 @@ public final class SharedPostgres {
         } catch (SQLException e) {
             throw new IllegalStateException(e);
         }
+    }
+
+    /** A connection of the role that owns the tables, which can do what the program cannot. */
+    public static Connection owner(String url) throws SQLException {
+        return DriverManager.getConnection(url, OWNER, "owner");
     }
 
     private static String url(String database) {
