@@ -1,5 +1,7 @@
 package org.levelgaze;
 
+import java.util.OptionalInt;
+import org.levelgaze.cli.Commands;
 import org.springframework.boot.SpringApplication;
 import org.springframework.boot.autoconfigure.SpringBootApplication;
 import org.springframework.modulith.Modulithic;
@@ -10,11 +12,15 @@ import org.springframework.modulith.Modulithic;
 public class Levelgaze {
 
     /**
-     * Starts the web application.
+     * Runs the command that the first argument names, or starts the web application.
      *
-     * @param arguments Spring Boot's own
+     * @param arguments a command and what it takes, or Spring Boot's own
      */
     public static void main(String[] arguments) {
+        OptionalInt code = Commands.run(arguments);
+        if (code.isPresent()) {
+            System.exit(code.getAsInt());
+        }
         SpringApplication.run(Levelgaze.class, arguments);
     }
 }
