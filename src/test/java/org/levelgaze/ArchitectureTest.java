@@ -98,7 +98,7 @@ class ArchitectureTest {
     static Stream<Arguments> ofTheTests() {
         return Stream.of(
                 rule("null that is said", ArchitectureRules::packagesAreNullMarked, "unmarked.Unmarked"),
-                rule("tests that are run", ArchitectureRules::testsAreCalledTest, "TestlessSuite.neverRuns"));
+                rule("tests that are run", ArchitectureRules::testsAreCalledTest, "SuiteOfNothing.neverRuns"));
     }
 
     private static Arguments rule(String name, Function<ArchitectureRules, ArchRule> rule, String... mustBeFound) {

@@ -21,6 +21,13 @@ final class Connections {
     }
 
     static void use(String url, Login login, Work work) throws SQLException {
+        try (Connection connection = open(url, login)) {
+            work.with(connection);
+        }
+    }
+
+    /** A connection for the caller to close. */
+    static Connection open(String url, Login login) throws SQLException {
         Properties properties = new Properties();
         if (login.user() != null) {
             properties.setProperty("user", login.user());
@@ -28,9 +35,7 @@ final class Connections {
         if (login.password() != null) {
             properties.setProperty("password", login.password());
         }
-        try (Connection connection = DriverManager.getConnection(url, properties)) {
-            work.with(connection);
-        }
+        return DriverManager.getConnection(url, properties);
     }
 
     /** Whether a query over these parameters has a row. */
@@ -42,6 +47,15 @@ final class Connections {
             try (ResultSet rows = statement.executeQuery()) {
                 return rows.next();
             }
+        }
+    }
+
+    /** The first column of a query's first row. */
+    static String text(Connection connection, String sql) throws SQLException {
+        try (Statement statement = connection.createStatement();
+                ResultSet answer = statement.executeQuery(sql)) {
+            answer.next();
+            return answer.getString(1);
         }
     }
 

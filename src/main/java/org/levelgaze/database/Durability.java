@@ -1,9 +1,7 @@
 package org.levelgaze.database;
 
 import java.sql.Connection;
-import java.sql.ResultSet;
 import java.sql.SQLException;
-import java.sql.Statement;
 import java.util.List;
 
 /** What must be switched on, in the sessions that store, for a commit to outlive a crash. */
@@ -21,7 +19,7 @@ final class Durability {
     }
 
     static void demand(Connection connection, String setting) throws SQLException {
-        String value = show(connection, setting);
+        String value = Connections.text(connection, "show " + setting);
         if (!value.equals("on")) {
             throw new DatabaseRefusal(
                     "PostgreSQL runs with " + setting + " = " + value + ": it could lose what it has acknowledged.",
@@ -29,14 +27,6 @@ final class Durability {
                             ? "Switch data_checksums on with pg_checksums while the program is stopped."
                             : "Switch " + setting
                                     + " on; look for it in the settings of the server, its roles and its databases.");
-        }
-    }
-
-    private static String show(Connection connection, String setting) throws SQLException {
-        try (Statement statement = connection.createStatement();
-                ResultSet answer = statement.executeQuery("show " + setting)) {
-            answer.next();
-            return answer.getString(1);
         }
     }
 }

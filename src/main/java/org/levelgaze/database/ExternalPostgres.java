@@ -1,9 +1,7 @@
 package org.levelgaze.database;
 
 import java.sql.Connection;
-import java.sql.ResultSet;
 import java.sql.SQLException;
-import java.sql.Statement;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -39,48 +37,40 @@ record ExternalPostgres(Access access) implements Database {
 
     /** Looks at the server, and makes the application's role on it where one login does both and may do so. */
     static ExternalPostgres open(Named named) {
-        Login owner = named.owner();
-        if (owner == null) {
-            return open(named, named.login(), named.role() == null ? Access.APPLICATION_ROLE : named.role(), true);
+        boolean switches = named.owner() == null;
+        String role = named.role();
+        if (role == null) {
+            role = switches ? Access.APPLICATION_ROLE : roleOf(named);
         }
-        String[] role = {named.role()};
-        ask(named.url(), named.login(), connection -> {
-            refuseOld(connection, named.address());
-            if (role[0] == null) {
-                role[0] = text(connection, "select current_user");
-            }
-        });
-        return open(named, owner, role[0], false);
-    }
-
-    private static ExternalPostgres open(Named named, Login owner, String role, boolean switches) {
+        Login owner = named.owner() == null ? named.login() : named.owner();
         String ownerUrl = named.ownerUrl() == null ? named.url() : named.ownerUrl();
         Access access = new Access(named.url(), ownerUrl, owner, named.login(), role, switches);
-        ask(ownerUrl, owner, connection -> {
-            refuseOld(connection, withoutParameters(ownerUrl));
+        try (Connection connection = Connections.open(ownerUrl, owner)) {
+            refuseOld(connection.getMetaData().getDatabaseMajorVersion(), withoutParameters(ownerUrl));
             demandRoomForTables(connection);
             if (switches) {
                 makeRole(connection, access);
             }
-        });
-        return new ExternalPostgres(access);
-    }
-
-    private static void ask(String url, Login login, Connections.Work work) {
-        try {
-            Connections.use(url, login, work);
+            return new ExternalPostgres(access);
         } catch (SQLException e) {
-            throw new DatabaseRefusal(
-                    "The PostgreSQL at " + withoutParameters(url) + " does not let " + login.user() + " in: "
-                            + e.getMessage(),
-                    "Check SPRING_DATASOURCE_URL, SPRING_DATASOURCE_USERNAME and SPRING_DATASOURCE_PASSWORD, and"
-                            + " SPRING_FLYWAY_USER and SPRING_FLYWAY_PASSWORD where they are set.");
+            throw notLetIn(ownerUrl, owner, e);
         }
     }
 
-    private static void refuseOld(Connection connection, String address) throws SQLException {
-        int major = connection.getMetaData().getDatabaseMajorVersion();
-        refuseOld(major, address);
+    private static String roleOf(Named named) {
+        try (Connection connection = Connections.open(named.url(), named.login())) {
+            return Connections.text(connection, "select current_user");
+        } catch (SQLException e) {
+            throw notLetIn(named.url(), named.login(), e);
+        }
+    }
+
+    private static DatabaseRefusal notLetIn(String url, Login login, SQLException why) {
+        return new DatabaseRefusal(
+                "The PostgreSQL at " + withoutParameters(url) + " does not let " + login.user() + " in: "
+                        + why.getMessage(),
+                "Check SPRING_DATASOURCE_URL, SPRING_DATASOURCE_USERNAME and SPRING_DATASOURCE_PASSWORD, and"
+                        + " SPRING_FLYWAY_USER and SPRING_FLYWAY_PASSWORD where they are set.");
     }
 
     /** Refuses a server older than what the migrations are written for. */
@@ -95,7 +85,7 @@ record ExternalPostgres(Access access) implements Database {
 
     private static void demandRoomForTables(Connection connection) throws SQLException {
         if (!Connections.any(connection, "select where has_schema_privilege(current_schema(), 'create')")) {
-            String login = text(connection, "select current_user");
+            String login = Connections.text(connection, "select current_user");
             throw new DatabaseRefusal(
                     "The login " + login + " may not create tables in the database " + connection.getCatalog() + ".",
                     "Let an administrator run: alter database " + Access.quoted(connection.getCatalog()) + " owner to "
@@ -105,7 +95,7 @@ record ExternalPostgres(Access access) implements Database {
 
     private static void makeRole(Connection connection, Access access) throws SQLException {
         String role = Access.quoted(access.role());
-        String login = Access.quoted(text(connection, "select session_user"));
+        String login = Access.quoted(Connections.text(connection, "select session_user"));
         if (canSwitch(connection, access)) {
             return;
         }
@@ -140,14 +130,6 @@ record ExternalPostgres(Access access) implements Database {
                 "Let an administrator run: create role " + role + " nologin; (if it is missing) and grant " + role
                         + " to " + login + "; or give the owner its own login in SPRING_FLYWAY_USER and"
                         + " SPRING_FLYWAY_PASSWORD.");
-    }
-
-    private static String text(Connection connection, String sql) throws SQLException {
-        try (Statement statement = connection.createStatement();
-                ResultSet answer = statement.executeQuery(sql)) {
-            answer.next();
-            return answer.getString(1);
-        }
     }
 
     /** An address as it may be shown: parameters can hold a password. */

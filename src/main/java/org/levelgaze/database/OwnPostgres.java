@@ -35,7 +35,7 @@ final class OwnPostgres implements Database {
 
     /** Starts it in this folder, as whom it can run here. */
     static OwnPostgres start(Path folder) {
-        return start(folder, ServerUser.find(), Map.of());
+        return start(folder, ServerUser.find(folder), Map.of());
     }
 
     /**

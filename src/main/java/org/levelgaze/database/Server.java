@@ -4,7 +4,6 @@ import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.net.InetAddress;
 import java.net.ServerSocket;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.List;
@@ -12,6 +11,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.StringJoiner;
 import java.util.concurrent.CompletableFuture;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
@@ -66,35 +66,45 @@ final class Server {
             }
             if (System.nanoTime() > until || PASSING.stream().noneMatch(said::contains)) {
                 throw new DatabaseRefusal(
-                        "PostgreSQL does not start in " + commands.home().data() + ": " + said,
+                        "PostgreSQL does not start in " + commands.home().data() + ": " + reason(said),
                         "Its log is in " + commands.home().logs() + ".");
             }
             pause();
         }
     }
 
+    /** The lines that say why, without the time before them; everything when there is none. */
+    private static String reason(String said) {
+        String fatal = said.lines()
+                .filter(line -> line.contains("FATAL:") || line.contains("PANIC:"))
+                .map(line -> line.replaceFirst(".*(FATAL|PANIC): +", ""))
+                .collect(Collectors.joining("; "));
+        return fatal.isEmpty() ? said : fatal + ".";
+    }
+
     /** Empty when it runs, else what it said. */
     private static String tryStart(ServerCommands commands, int port, Map<String, String> settings) {
         Path data = commands.home().data();
-        Path log = commands.home().logs().resolve("start.log");
         StringJoiner options = new StringJoiner(" ");
         options.add("-p " + port);
         Stream.of(SETTINGS, settings)
                 .flatMap(map -> map.entrySet().stream())
                 .forEach(setting -> options.add("-c " + setting.getKey() + "=" + setting.getValue()));
-        try {
-            Files.deleteIfExists(log);
-            ServerCommands.Outcome outcome = commands.run(
-                    "pg_ctl",
-                    List.of("start", "-w", "-t", START_SECONDS, "-D", data + "", "-l", log + "", "-o", options + ""));
-            if (outcome.succeeded()) {
-                return "";
-            }
-            return outcome.output() + "\n"
-                    + (Files.exists(log) ? Files.readString(log).strip() : "");
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
+        ServerLog log = ServerLog.from(commands.home().logs());
+        ServerCommands.Outcome outcome = commands.run(
+                "pg_ctl",
+                List.of(
+                        "start",
+                        "-w",
+                        "-t",
+                        START_SECONDS,
+                        "-D",
+                        data.toString(),
+                        "-l",
+                        commands.home().logs().resolve("start.log").toString(),
+                        "-o",
+                        options.toString()));
+        return outcome.succeeded() ? "" : outcome.output() + "\n" + log.said();
     }
 
     /** Stops a PostgreSQL that serves our folder, and removes a pid file whose number means another process now. */

@@ -1,6 +1,7 @@
 package org.levelgaze.database;
 
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.FileSystems;
 import java.nio.file.Files;
@@ -25,11 +26,12 @@ record ServerUser(List<String> prefix, @Nullable UserPrincipal owner, String wor
     /** Tried in this order when root can use no user namespace. */
     private static final List<String> ORDINARY_USERS = List.of("levelgaze", "postgres", "nobody");
 
-    /** The way that works here. */
-    static ServerUser find() {
+    /** The way that works here, for a home folder that may be there already. */
+    static ServerUser find(Path home) {
         if (!startedAsRoot()) {
             return new ServerUser(List.of(), null, "this user");
         }
+        refuseFolderOfAnother(home);
         return inNamespace()
                 .or(() -> ORDINARY_USERS.stream()
                         .flatMap(name -> named(name).stream())
@@ -38,6 +40,21 @@ record ServerUser(List<String> prefix, @Nullable UserPrincipal owner, String wor
                         "Levelgaze was started as root, PostgreSQL does not run as root, and neither a user namespace"
                                 + " (unshare) nor another user (setpriv) can be used here.",
                         "Start Levelgaze as an ordinary user, or name a PostgreSQL server in SPRING_DATASOURCE_URL."));
+    }
+
+    /** Root would leave files behind that the folder's own user cannot open any more. */
+    private static void refuseFolderOfAnother(Path home) {
+        try {
+            if (Files.exists(home) && !Files.getOwner(home).equals(principal("root"))) {
+                String user = Files.getOwner(home).getName();
+                throw new DatabaseRefusal(
+                        "The folder " + home.toAbsolutePath() + " belongs to the user " + user
+                                + ", and Levelgaze was started as root.",
+                        "Start it as " + user + ", give the folder to root, or name another one in LEVELGAZE_HOME.");
+            }
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
     }
 
     static boolean startedAsRoot() {

@@ -9,9 +9,8 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.attribute.PosixFilePermissions;
-import java.sql.ResultSet;
+import java.sql.Connection;
 import java.sql.SQLException;
-import java.sql.Statement;
 import java.time.Duration;
 import java.util.List;
 import java.util.Map;
@@ -206,7 +205,7 @@ class OwnPostgresTest {
 
     @Test
     void refusesToServeWithASettingThatLosesData() throws IOException {
-        assertThatThrownBy(() -> OwnPostgres.start(home, ServerUser.find(), Map.of("fsync", "off")))
+        assertThatThrownBy(() -> OwnPostgres.start(home, ServerUser.find(home), Map.of("fsync", "off")))
                 .isInstanceOf(DatabaseRefusal.class)
                 .hasMessage("PostgreSQL runs with fsync = off: it could lose what it has acknowledged.");
         assertThat(home.resolve("postgres/postmaster.pid"))
@@ -227,6 +226,27 @@ class OwnPostgresTest {
         assertThatThrownBy(() -> OwnPostgres.start(home))
                 .isInstanceOf(DatabaseRefusal.class)
                 .hasMessageContaining("synchronous_commit = off");
+    }
+
+    @Test
+    void saysWhyItDoesNotStart() {
+        assertThatThrownBy(() -> OwnPostgres.start(home, ServerUser.find(home), Map.of("hba_file", "missing.conf")))
+                .isInstanceOf(DatabaseRefusal.class)
+                .hasMessage("PostgreSQL does not start in " + home.resolve("postgres") + ": could not load "
+                        + home.resolve("missing.conf") + ".");
+    }
+
+    @Test
+    void refusesTheFolderOfAnotherUserWhenStartedAsRoot() throws IOException {
+        assumeThat(ServerUser.startedAsRoot()).isTrue();
+        ServerUser nobody = ServerUser.named("nobody").orElseThrow();
+        Path another = Files.createDirectory(folder.resolve("another"));
+        nobody.takeOver(another);
+
+        assertThatThrownBy(() -> OwnPostgres.start(another))
+                .isInstanceOf(DatabaseRefusal.class)
+                .hasMessage(
+                        "The folder " + another + " belongs to the user nobody, and Levelgaze was started as root.");
     }
 
     @Test
@@ -273,15 +293,9 @@ class OwnPostgresTest {
     }
 
     private static String ask(String url, Login login, String sql) throws SQLException {
-        String[] answer = {""};
-        Connections.use(url, login, connection -> {
-            try (Statement statement = connection.createStatement();
-                    ResultSet rows = statement.executeQuery(sql)) {
-                rows.next();
-                answer[0] = rows.getString(1);
-            }
-        });
-        return answer[0];
+        try (Connection connection = Connections.open(url, login)) {
+            return Connections.text(connection, sql);
+        }
     }
 
     private static String rights(Path path) throws IOException {

@@ -44,7 +44,7 @@ final class PreparedHome {
             Path folder = Files.createTempDirectory("levelgaze-home");
             Runtime.getRuntime().addShutdownHook(new Thread(() -> delete(folder)));
             Path home = folder.resolve("home");
-            OwnPostgres.start(home, ServerUser.find(), Map.of()).close();
+            OwnPostgres.start(home, ServerUser.find(home), Map.of()).close();
             return home.toRealPath();
         } catch (IOException e) {
             throw new UncheckedIOException(e);

@@ -35,7 +35,7 @@ class ProgramsTest {
     void areOfTheMajorVersionThatDataFoldersAreHeldAgainst() {
         Home home = Home.in(PreparedHome.original());
         ServerCommands commands =
-                new ServerCommands(Programs.unpack(home, Programs.archive()), ServerUser.find(), home);
+                new ServerCommands(Programs.unpack(home, Programs.archive()), ServerUser.find(home.folder()), home);
 
         assertThat(commands.run("postgres", List.of("--version")).output())
                 .startsWith("postgres (PostgreSQL) " + Programs.MAJOR + ".");

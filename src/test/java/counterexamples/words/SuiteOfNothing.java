@@ -3,7 +3,7 @@ package counterexamples.words;
 import org.junit.jupiter.api.Test;
 
 /** A test that no build runs, because of its name. */
-class TestlessSuite {
+class SuiteOfNothing {
 
     @Test
     void neverRuns() {}
