@@ -15,7 +15,7 @@ enum Tone {
     INK_SOFT("#545b69"),
     ACCENT("#3a4fb0"),
     STRICT("#1f6f8b"),
-    LENIENT("#b4532a"),
+    LENIENT("#a94b24"),
     EVEN("#5b6170"),
     FAULT("#8c2f4f");
 

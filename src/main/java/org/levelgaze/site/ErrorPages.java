@@ -16,9 +16,9 @@ import org.springframework.web.servlet.ModelAndView;
 class ErrorPages implements ErrorController {
 
     private final Problems problems;
-    private final Words words;
+    private final Sentences words;
 
-    ErrorPages(Problems problems, Words words) {
+    ErrorPages(Problems problems, Sentences words) {
         this.problems = problems;
         this.words = words;
     }

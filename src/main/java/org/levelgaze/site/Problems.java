@@ -19,9 +19,9 @@ import org.springframework.validation.BindingResult;
 @Component
 class Problems {
 
-    private final Words words;
+    private final Sentences words;
 
-    Problems(Words words) {
+    Problems(Sentences words) {
         this.words = words;
     }
 

@@ -14,14 +14,14 @@ import org.springframework.web.util.UriComponentsBuilder;
  */
 public final class Shell {
 
-    private final Words words;
+    private final Sentences words;
     private final Locale locale;
     private final String theme;
     private final String query;
     private final @Nullable String who;
     private final List<Place> places;
 
-    Shell(Words words, Locale locale, String theme, String query, @Nullable String who, List<Place> places) {
+    Shell(Sentences words, Locale locale, String theme, String query, @Nullable String who, List<Place> places) {
         this.words = words;
         this.locale = locale;
         this.theme = theme;

@@ -21,10 +21,10 @@ import org.springframework.web.servlet.support.RequestContextUtils;
 @Component
 class ShellInterceptor implements HandlerInterceptor {
 
-    private final Words words;
+    private final Sentences words;
     private final ObjectProvider<WebInvocationPrivilegeEvaluator> rules;
 
-    ShellInterceptor(Words words, ObjectProvider<WebInvocationPrivilegeEvaluator> rules) {
+    ShellInterceptor(Sentences words, ObjectProvider<WebInvocationPrivilegeEvaluator> rules) {
         this.words = words;
         this.rules = rules;
     }
@@ -38,18 +38,18 @@ class ShellInterceptor implements HandlerInterceptor {
                 Themes.of(request, response),
                 query(request),
                 who == null ? null : who.getName(),
-                places(who));
+                places(who, request.getContextPath()));
         request.setAttribute("shell", shell);
         return true;
     }
 
-    private List<Place> places(@Nullable Principal who) {
+    private List<Place> places(@Nullable Principal who, String contextPath) {
         WebInvocationPrivilegeEvaluator evaluator = rules.getIfAvailable();
         if (evaluator == null || !(who instanceof Authentication authentication)) {
             return List.of();
         }
         return Place.ALL.stream()
-                .filter(place -> evaluator.isAllowed(place.href(), authentication))
+                .filter(place -> evaluator.isAllowed(contextPath, place.href(), "GET", authentication))
                 .toList();
     }
 

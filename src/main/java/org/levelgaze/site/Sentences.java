@@ -1,7 +1,11 @@
 package org.levelgaze.site;
 
+import java.text.MessageFormat;
+import java.util.Collections;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
+import java.util.stream.Stream;
 import org.levelgaze.shared.Refusal;
 import org.levelgaze.shared.RowError;
 import org.springframework.context.MessageSource;
@@ -10,11 +14,11 @@ import org.springframework.stereotype.Component;
 
 /** The sentences of refusals in the reader's language. */
 @Component
-class Words {
+class Sentences {
 
     private final MessageSource messages;
 
-    Words(MessageSource messages) {
+    Sentences(MessageSource messages) {
         this.messages = messages;
     }
 
@@ -43,5 +47,22 @@ class Words {
 
     String sentence(String key, List<?> arguments, Locale locale) {
         return messages.getMessage(key, arguments.toArray(), locale);
+    }
+
+    /** The sentence of a kind of problem with dots in place of what it names, if there is such a kind. */
+    Optional<String> pattern(String type, Locale locale) {
+        return Stream.of("refusal." + type, "site.problem." + type)
+                .flatMap(key -> Optional.ofNullable(messages.getMessage(key, null, null, locale)).stream())
+                .map(pattern -> pattern.indexOf('{') < 0 ? pattern : dotted(pattern, locale))
+                .findFirst();
+    }
+
+    private static String dotted(String pattern, Locale locale) {
+        MessageFormat format = new MessageFormat(pattern, locale);
+        int places = format.getFormatsByArgumentIndex().length;
+        for (int place = 0; place < places; place++) {
+            format.setFormatByArgumentIndex(place, null);
+        }
+        return format.format(Collections.nCopies(places, "…").toArray());
     }
 }
