@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.sql.SQLException;
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
@@ -29,7 +30,7 @@ class DatabaseConfigurationTest {
 
     private final ApplicationContextRunner program = new ApplicationContextRunner()
             .withConfiguration(AutoConfigurations.of(DataSourceAutoConfiguration.class, FlywayAutoConfiguration.class))
-            .withUserConfiguration(DatabaseConfiguration.class, ApplicationRole.class, DatabaseHealth.class);
+            .withUserConfiguration(DatabaseConfiguration.class, ApplicationRole.class, DatabaseHealthIndicator.class);
 
     @Test
     void migratesAsTheOwnerWorksAsTheApplicationAndStopsPostgresLast(@TempDir Path folder) throws IOException {
@@ -41,7 +42,9 @@ class DatabaseConfigurationTest {
                     assertThat(context).hasNotFailed();
                     assertThat(ask(context, OWNERS)).isEqualTo("levelgaze_owner");
                     assertThat(ask(context, "select current_user")).isEqualTo("levelgaze_app");
-                    assertThat(context.getBean(DatabaseHealth.class).health().getStatus())
+                    assertThat(context.getBean(DatabaseHealthIndicator.class)
+                                    .health()
+                                    .getStatus())
                             .isEqualTo(Status.UP);
                 });
 
@@ -53,16 +56,19 @@ class DatabaseConfigurationTest {
     @Test
     void isUnhealthyAtOnceWhenPostgresHasEnded(@TempDir Path folder) throws IOException {
         Path home = PreparedHome.copyTo(folder);
-        try (OwnPostgres postgres = OwnPostgres.start(home)) {
-            DatabaseHealth health = new DatabaseHealth(postgres);
+        program.withPropertyValues("levelgaze.home=" + home).run(context -> {
+            DatabaseHealthIndicator health = context.getBean(DatabaseHealthIndicator.class);
+            OwnPostgres postgres = (OwnPostgres) context.getBean(Database.class);
             ProcessHandle process = ProcessHandle.of(postgres.pid()).orElseThrow();
             assertThat(health.health().getStatus()).isEqualTo(Status.UP);
 
             process.destroyForcibly();
             process.onExit().join();
 
+            long before = System.nanoTime();
             assertThat(health.health().getStatus()).isEqualTo(Status.DOWN);
-        }
+            assertThat(Duration.ofNanos(System.nanoTime() - before)).isLessThan(Duration.ofSeconds(5));
+        });
         Files.delete(home.resolve("postgres-program"));
     }
 
