@@ -57,6 +57,9 @@ class KilledWhileImportingTest {
         }
         try (RunningProgram program = RunningProgram.start(folder.resolve("home"))) {
             assertWhole(program, acknowledged, "seed " + SEED + ", after the last kill");
+            assertThat(RunningProgram.command(folder.resolve("home"), "verify"))
+                    .contains("the journal is intact", "0 differ", "Everything that is stored follows from its facts.")
+                    .endsWith("exit 0");
         }
     }
 

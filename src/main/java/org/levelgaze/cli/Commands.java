@@ -15,6 +15,8 @@ public final class Commands {
 
     /** All went well. */
     static final int DONE = 0;
+    /** What is stored does not hold. */
+    static final int BROKEN = 1;
     /** The input or the command line cannot be taken. */
     static final int REFUSED = 2;
 
@@ -43,6 +45,7 @@ public final class Commands {
         List<String> rest = Arrays.asList(arguments).subList(1, arguments.length);
         return switch (arguments[0]) {
             case "assess" -> OptionalInt.of(new AssessCommand(console).run(rest));
+            case "verify" -> OptionalInt.of(new VerifyCommand(console).run(rest));
             case "help", "--help" -> OptionalInt.of(help(console));
             default ->
                 arguments[0].startsWith("-") ? OptionalInt.empty() : OptionalInt.of(unknown(console, arguments[0]));

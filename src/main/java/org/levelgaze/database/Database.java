@@ -1,7 +1,7 @@
 package org.levelgaze.database;
 
 /** What the program stores in: its own PostgreSQL, or one that is named to it. */
-sealed interface Database extends AutoCloseable permits OwnPostgres, ExternalPostgres {
+sealed interface Database extends AutoCloseable permits OwnPostgres, JoinedPostgres, ExternalPostgres {
 
     /** How to reach it. */
     Access access();

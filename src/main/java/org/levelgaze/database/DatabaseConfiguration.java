@@ -25,9 +25,15 @@ class DatabaseConfiguration {
     private static final String ROLE = "appRole";
 
     @Bean
-    Database database(Environment environment, @Value("${levelgaze.home:levelgaze-data}") Path home) {
+    Database database(
+            Environment environment,
+            @Value("${levelgaze.home:levelgaze-data}") Path home,
+            @Value("${levelgaze.database.join:false}") boolean join) {
         String url = environment.getProperty("spring.datasource.url");
-        return url == null || url.isBlank() ? OwnPostgres.start(home) : ExternalPostgres.open(named(environment, url));
+        if (url != null && !url.isBlank()) {
+            return ExternalPostgres.open(named(environment, url));
+        }
+        return join ? JoinedPostgres.orStart(home) : OwnPostgres.start(home);
     }
 
     private static ExternalPostgres.Named named(Environment environment, String url) {

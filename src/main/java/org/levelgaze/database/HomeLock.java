@@ -42,6 +42,15 @@ final class HomeLock implements AutoCloseable {
         }
     }
 
+    /** Whether no other program has the folder now. */
+    static boolean isFree(Home home) {
+        try (FileChannel channel = FileChannel.open(home.lock(), StandardOpenOption.CREATE, StandardOpenOption.WRITE)) {
+            return locked(channel);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
     private static boolean locked(FileChannel channel) throws IOException {
         try {
             return channel.tryLock(LOCKED_BYTE, 1, false) != null;

@@ -6,6 +6,7 @@ import java.net.URI;
 import java.net.http.HttpClient;
 import java.net.http.HttpRequest;
 import java.net.http.HttpResponse;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
@@ -115,6 +116,24 @@ public final class RunningProgram implements AutoCloseable {
     /** Ends the process as kill -9 does: nothing of the program runs any more. */
     public void kill() throws InterruptedException {
         process.destroyForcibly().waitFor();
+    }
+
+    /** Runs a command of the program beside it, on the same home, and answers what it printed and its exit code. */
+    public static String command(Path home, String... arguments) throws IOException, InterruptedException {
+        ProcessBuilder builder = new ProcessBuilder(
+                Path.of(System.getProperty("java.home"), "bin", "java").toString());
+        builder.command()
+                .addAll(List.of(
+                        "-XX:TieredStopAtLevel=1",
+                        "-cp",
+                        System.getProperty("java.class.path"),
+                        "org.levelgaze.Levelgaze"));
+        builder.command().addAll(List.of(arguments));
+        builder.environment().put("LEVELGAZE_HOME", home.toString());
+        builder.environment().put("LC_ALL", "C");
+        Process command = builder.redirectErrorStream(true).start();
+        String printed = new String(command.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
+        return printed + "exit " + command.waitFor();
     }
 
     /** What the program has printed. */
