@@ -53,7 +53,7 @@ class AccountController {
             FormFault.refuseUnlessEqual(password, repeated);
             signIn.confirm(own(actor), present, request.getRemoteAddr());
             accounts.changePassword(actor, own(actor).id(), password);
-            visits.open(own(actor), request, response);
+            visits.goOn(own(actor), request, response);
             next.addFlashAttribute("notice", "access.account.password.changed");
             return "redirect:/account";
         } catch (Refusal refusal) {
@@ -73,7 +73,7 @@ class AccountController {
             throw new Refusal(Refusal.Kind.INVALID, "language", language);
         }
         accounts.changeLanguage(actor, own(actor).id(), Locale.forLanguageTag(language));
-        visits.open(own(actor), request, response);
+        visits.goOn(own(actor), request, response);
         next.addFlashAttribute("notice", "access.account.language.changed");
         return "redirect:/account";
     }

@@ -3,6 +3,7 @@ package org.levelgaze.access;
 import jakarta.servlet.http.HttpServletResponse;
 import java.util.List;
 import java.util.Locale;
+import java.util.Objects;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.journal.Actor;
@@ -35,6 +36,14 @@ class AccountsController {
             String password,
             String language,
             @Nullable Set<Role> roles) {
+
+        /** What was not sent is empty. */
+        Form {
+            displayName = Objects.requireNonNullElse(displayName, "");
+            loginName = Objects.requireNonNullElse(loginName, "");
+            password = Objects.requireNonNullElse(password, "");
+            language = Objects.requireNonNullElse(language, "");
+        }
 
         NewAccount account() {
             return new NewAccount(

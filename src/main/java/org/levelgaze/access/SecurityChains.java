@@ -89,7 +89,8 @@ class SecurityChains {
                         .access((caller, asked) -> new AuthorizationDecision(Routes.admit(asked.getRequest(), caller))))
                 .exceptionHandling(
                         failures -> failures.authenticationEntryPoint(refused).accessDeniedHandler(refused))
-                .headers(headers -> headers.contentSecurityPolicy(policy -> policy.policyDirectives(CONTENT_POLICY))
+                .headers(headers -> headers.httpStrictTransportSecurity(https -> https.includeSubDomains(false))
+                        .contentSecurityPolicy(policy -> policy.policyDirectives(CONTENT_POLICY))
                         .referrerPolicy(referrer -> referrer.policy(ReferrerPolicy.SAME_ORIGIN))
                         .permissionsPolicyHeader(devices -> devices.policy(UNUSED_DEVICES)))
                 .build();

@@ -27,10 +27,10 @@ class SessionAccounts implements SecurityContextRepository {
     static final Duration IDLE = Duration.ofHours(4);
     static final Duration LONGEST = Duration.ofHours(12);
 
-    private static final String SITE = "site";
-    private static final String ACCOUNT = "account";
-    private static final String CREDENTIALS = "credentials";
-    private static final String SINCE = "since";
+    private static final String SITE = "access.site";
+    private static final String ACCOUNT = "access.account";
+    private static final String CREDENTIALS = "access.credentials";
+    private static final String SINCE = "access.since";
 
     private final Accounts accounts;
     private final Clock clock;

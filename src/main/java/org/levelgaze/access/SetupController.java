@@ -3,6 +3,7 @@ package org.levelgaze.access;
 import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.util.Locale;
+import java.util.Objects;
 import org.levelgaze.shared.Refusal;
 import org.springframework.stereotype.Controller;
 import org.springframework.ui.Model;
@@ -26,6 +27,15 @@ class SetupController {
     /** What the page asks for. */
     record Form(String code, String displayName, String loginName, String password, String repeated) {
 
+        /** What was not sent is empty. */
+        Form {
+            code = Objects.requireNonNullElse(code, "");
+            displayName = Objects.requireNonNullElse(displayName, "");
+            loginName = Objects.requireNonNullElse(loginName, "");
+            password = Objects.requireNonNullElse(password, "");
+            repeated = Objects.requireNonNullElse(repeated, "");
+        }
+
         NewAccount account(Locale language) {
             FormFault.refuseUnlessEqual(password, repeated);
             return new NewAccount(loginName, displayName, password, FirstSetup.FIRST_ROLES, language);
@@ -48,7 +58,7 @@ class SetupController {
             HttpServletResponse response) {
         refuseWhenDone();
         try {
-            visits.open(setup.complete(form.code(), form.account(language)), request, response);
+            visits.enter(setup.complete(form.code(), form.account(language)), request, response);
             return "redirect:/";
         } catch (Refusal refusal) {
             FormFault.show(refusal, model, response);

@@ -3,6 +3,7 @@ package org.levelgaze.access;
 import jakarta.servlet.http.HttpServletRequest;
 import jakarta.servlet.http.HttpServletResponse;
 import java.security.Principal;
+import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.shared.Refusal;
 import org.springframework.stereotype.Controller;
@@ -26,7 +27,14 @@ class SignInController {
     }
 
     /** What the page asks for. */
-    record Form(String loginName, String password) {}
+    record Form(String loginName, String password) {
+
+        /** What was not sent is empty. */
+        Form {
+            loginName = Objects.requireNonNullElse(loginName, "");
+            password = Objects.requireNonNullElse(password, "");
+        }
+    }
 
     @GetMapping("/sign-in")
     String ask(@RequestParam(required = false) @Nullable String after, @Nullable Principal signedIn, Model model) {
@@ -42,8 +50,8 @@ class SignInController {
     String enter(
             @ModelAttribute("form") Form form, Model model, HttpServletRequest request, HttpServletResponse response) {
         try {
-            visits.open(signIn.check(form.loginName(), form.password(), request.getRemoteAddr()), request, response);
-            return "redirect:" + visits.wantedPage(request, response);
+            Account account = signIn.check(form.loginName(), form.password(), request.getRemoteAddr());
+            return "redirect:" + visits.enter(account, request, response);
         } catch (Refusal refusal) {
             FormFault.show(refusal, model, response);
             return "access/sign-in";

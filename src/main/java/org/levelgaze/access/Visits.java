@@ -29,16 +29,29 @@ class Visits {
         this.languages = languages;
     }
 
-    /** Signs the account in, in its language, under a session id that nobody knew before. */
-    void open(Account account, HttpServletRequest request, HttpServletResponse response) {
+    /**
+     * Signs the account in, in its language and in a session that has nothing of the one before: neither its id, which
+     * somebody may have planted, nor what somebody else left in it.
+     *
+     * @return the page that was asked for before the sign-in, Today when there was none
+     */
+    String enter(Account account, HttpServletRequest request, HttpServletResponse response) {
+        String wantedPage = wantedPage(request, response);
+        end(request);
+        sessions.signIn(account, request.getSession());
+        languages.setLocale(request, response, account.language());
+        return wantedPage;
+    }
+
+    /** Goes on after a change of the account, under a new session id and with new secrets in its forms. */
+    void goOn(Account account, HttpServletRequest request, HttpServletResponse response) {
         freshSecrets.onAuthentication(
                 Caller.person(account.actor(), account.displayName(), account.roles()), request, response);
         sessions.signIn(account, request.getSession());
         languages.setLocale(request, response, account.language());
     }
 
-    /** The page that was asked for before the sign-in, Today when there was none. */
-    String wantedPage(HttpServletRequest request, HttpServletResponse response) {
+    private String wantedPage(HttpServletRequest request, HttpServletResponse response) {
         if (wanted.getRequest(request, response) instanceof DefaultSavedRequest saved) {
             wanted.removeRequest(request, response);
             String query = saved.getQueryString();

@@ -236,6 +236,17 @@ class FirstStartTest {
 
     @Test
     @Order(AFTER)
+    void aFormThatLacksItsFieldsIsRefusedLikeAnEmptyOne() {
+        assertThat(visitor.fillIn("/sign-in", "/sign-in", Map.of()).statusCode())
+                .isEqualTo(422);
+        assertThat(administrator()
+                        .fillIn("/settings/accounts", "/settings/accounts", Map.of())
+                        .statusCode())
+                .isEqualTo(422);
+    }
+
+    @Test
+    @Order(AFTER)
     void aPasswordOfAMegabyteIsJustWrong() {
         assertThat(visitor.signIn(person(Role.APPRAISER), "x".repeat(1_000_000)).body())
                 .contains("Sign-in name and password do not fit");
