@@ -97,7 +97,7 @@ final class Routes {
         add(GET, programs(Scope.READ), "/api/v1/sets", "/api/v1/sets/{code}");
         add(POST, programs(Scope.WRITE), "/api/v1/sets");
         add(GET, programs(Scope.READ), "/api/v1/studies", "/api/v1/studies/{id}", "/api/v1/studies/{id}/findings");
-        add(GET, programs(Scope.KEY_READ), "/api/v1/studies/{id}/calls.csv");
+        add(GET, programs(Scope.KEY_READ), "/api/v1/studies/{id}/calls.csv", "/api/v1/sets/{code}/pieces");
         add(POST, programs(Scope.WRITE), "/api/v1/studies");
         add(GET, programs(Scope.READ), "/api/v1/journal", "/api/v1/journal/verification");
     }
