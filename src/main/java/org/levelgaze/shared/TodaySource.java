@@ -6,6 +6,11 @@ import java.util.List;
 @FunctionalInterface
 public interface TodaySource {
 
-    /** What needs a hand at this site now, the most pressing first. */
-    List<TodayLine> lines(SiteId site);
+    /**
+     * What needs a hand now, the most pressing first, and only so many that a person can read them.
+     *
+     * @param site at which site
+     * @param who whose day it is, as the journal names people
+     */
+    List<TodayLine> lines(SiteId site, String who);
 }

@@ -7,26 +7,22 @@ import java.security.Principal;
 import java.util.List;
 import java.util.Objects;
 import org.jspecify.annotations.Nullable;
-import org.springframework.beans.factory.ObjectProvider;
-import org.springframework.security.core.Authentication;
-import org.springframework.security.web.access.WebInvocationPrivilegeEvaluator;
 import org.springframework.stereotype.Component;
 import org.springframework.web.servlet.HandlerInterceptor;
 import org.springframework.web.servlet.support.RequestContextUtils;
 
 /**
- * Puts the {@link Shell} into every request, before anything can go wrong in it, so that error pages have one too. The
- * rules of sign-in say which places a role may open; they are asked, not repeated here.
+ * Puts the {@link Shell} into every request, before anything can go wrong in it, so that error pages have one too.
  */
 @Component
 class ShellInterceptor implements HandlerInterceptor {
 
     private final Sentences words;
-    private final ObjectProvider<WebInvocationPrivilegeEvaluator> rules;
+    private final Doors doors;
 
-    ShellInterceptor(Sentences words, ObjectProvider<WebInvocationPrivilegeEvaluator> rules) {
+    ShellInterceptor(Sentences words, Doors doors) {
         this.words = words;
-        this.rules = rules;
+        this.doors = doors;
     }
 
     @Override
@@ -44,12 +40,8 @@ class ShellInterceptor implements HandlerInterceptor {
     }
 
     private List<Place> places(@Nullable Principal who, String contextPath) {
-        WebInvocationPrivilegeEvaluator evaluator = rules.getIfAvailable();
-        if (evaluator == null || !(who instanceof Authentication authentication)) {
-            return List.of();
-        }
         return Place.ALL.stream()
-                .filter(place -> evaluator.isAllowed(contextPath, place.href(), "GET", authentication))
+                .filter(place -> doors.isOpen(who, contextPath, place.href()))
                 .toList();
     }
 

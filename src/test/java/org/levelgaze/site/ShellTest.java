@@ -1,7 +1,7 @@
 package org.levelgaze.site;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.springframework.security.test.web.servlet.request.SecurityMockMvcRequestPostProcessors.user;
+import static org.springframework.security.test.web.servlet.request.SecurityMockMvcRequestPostProcessors.authentication;
 import static org.springframework.security.test.web.servlet.setup.SecurityMockMvcConfigurers.springSecurity;
 import static org.springframework.test.web.servlet.request.MockMvcRequestBuilders.get;
 
@@ -10,8 +10,13 @@ import jakarta.servlet.http.Cookie;
 import java.net.URI;
 import java.util.Locale;
 import java.util.Objects;
+import java.util.Set;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
+import org.levelgaze.access.Caller;
+import org.levelgaze.access.Role;
+import org.levelgaze.journal.Actor;
+import org.levelgaze.shared.SiteId;
 import org.levelgaze.testing.WithDatabase;
 import org.springframework.beans.factory.annotation.Autowired;
 import org.springframework.boot.test.context.SpringBootTest;
@@ -32,8 +37,25 @@ class ShellTest {
     void open() {
         pages = MockMvcTester.create(MockMvcBuilders.webAppContextSetup(context)
                 .apply(springSecurity())
-                .defaultRequest(get("/").with(user("Ana").roles("ADMINISTRATOR")))
+                .defaultRequest(get("/").with(authentication(ana(Role.ADMINISTRATOR))))
                 .build());
+    }
+
+    /** At a site without studies, so that what other tests leave behind does not matter. */
+    private static Caller ana(Role role) {
+        return Caller.person(new Actor(new SiteId(9), "account:1"), "Ana Reyes", Set.of(role));
+    }
+
+    @Test
+    void showsThePlacesThatTheRoleMayOpen() {
+        assertThat(pages.get().uri("/"))
+                .bodyText()
+                .contains("href=\"/studies\"", "href=\"/journal\"", "href=\"/settings\"")
+                .contains("<a href=\"/\" aria-current=\"page\">");
+        assertThat(pages.get().uri("/").with(authentication(ana(Role.PROCTOR))))
+                .bodyText()
+                .contains("href=\"/studies\"")
+                .doesNotContain("href=\"/journal\"", "href=\"/settings\"");
     }
 
     @Test
@@ -41,7 +63,7 @@ class ShellTest {
         assertThat(pages.get().uri("/").locale(Locale.ENGLISH))
                 .hasStatusOk()
                 .bodyText()
-                .contains("<html lang=\"en\"", "A good day", "Skip to the content", "Ana", "Sign out")
+                .contains("<html lang=\"en\"", "A good day", "Skip to the content", "Ana Reyes", "Sign out")
                 .contains("name=\"_csrf\"");
     }
 
