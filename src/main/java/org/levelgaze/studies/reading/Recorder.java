@@ -22,6 +22,7 @@ final class Recorder {
 
         String truthText = "";
         int truthRow;
+        boolean truthUnclear;
 
         @Nullable
         String defect;
@@ -94,6 +95,11 @@ final class Recorder {
         }
     }
 
+    /** A row says something of this piece's true state that is no true state, and is named for it already. */
+    void truthUnclear(int place) {
+        pieces.get(place).truthUnclear = true;
+    }
+
     void defect(int place, int kind, int row, Column column) {
         KnownPiece piece = pieces.get(place);
         String name = kindNames.get(kind);
@@ -159,7 +165,7 @@ final class Recorder {
         int place = 0;
         for (String label : labels.keySet()) {
             KnownPiece piece = pieces.get(place++);
-            if (piece.truth == null) {
+            if (piece.truth == null && !piece.truthUnclear) {
                 bad.add(piece.row, reference, "", "no-truth", reference, label);
             }
         }

@@ -78,7 +78,9 @@ final class RowReader {
         }
         String text = cells.get(column.at());
         TrueState truth = word(text, row, column, truths, words.good(), words.defective());
-        if (truth != null) {
+        if (truth == null) {
+            recorder.truthUnclear(piece);
+        } else {
             recorder.truth(piece, truth, text, row, column);
         }
     }
