@@ -53,7 +53,7 @@ final class CallFile {
      * @throws Refusal when the file as a whole cannot be taken
      */
     static CallFile open(InputStream file) throws IOException {
-        FileBytes bytes = new FileBytes(file);
+        FileBytes bytes = new FileBytes(file, Limits.BYTES);
         return new CallFile(bytes, FileHead.of(bytes));
     }
 

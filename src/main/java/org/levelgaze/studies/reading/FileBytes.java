@@ -11,10 +11,12 @@ import java.util.HexFormat;
 final class FileBytes extends FilterInputStream {
 
     private final MessageDigest digest;
+    private final long limit;
     private long count;
 
-    FileBytes(InputStream file) {
+    FileBytes(InputStream file, long limit) {
         super(file);
+        this.limit = limit;
         try {
             digest = MessageDigest.getInstance("SHA-256");
         } catch (NoSuchAlgorithmException e) {
@@ -42,7 +44,7 @@ final class FileBytes extends FilterInputStream {
         if (got > 0) {
             count += got;
             digest.update(into, offset, got);
-            CallFile.refuseAbove(Limits.BYTES, count, "file-too-large");
+            CallFile.refuseAbove(limit, count, "file-too-large");
         }
         return got;
     }

@@ -302,7 +302,7 @@ class CallReaderTest {
 
     @Test
     void stopsAFileThatIsTooLarge() {
-        InputStream endless = new FileBytes(new Endless(HEADER.getBytes(StandardCharsets.UTF_8)));
+        InputStream endless = new FileBytes(new Endless(HEADER.getBytes(StandardCharsets.UTF_8)), 1_000_000);
 
         assertThatThrownBy(() -> endless.transferTo(OutputStream.nullOutputStream()))
                 .isInstanceOfSatisfying(Refusal.class, refusal -> {
