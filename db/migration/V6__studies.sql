@@ -145,6 +145,8 @@ create table upload (
     request text,
     rows_done bigint not null default 0,
     bytes_done bigint not null default 0,
+    calls_in_all bigint,
+    run_no int not null default 0,
     cancel_wanted boolean not null default false,
     study_id bigint,
     problem text,
@@ -152,6 +154,8 @@ create table upload (
     primary key (site_id, upload_id),
     foreign key (site_id, study_id) references study
 );
+comment on column upload.calls_in_all is 'known once the file is read: rows_done then counts calls stored';
+comment on column upload.run_no is 'counts the runs; only the latest may end the upload';
 create index upload_by_owner on upload (site_id, owner, uploaded_at desc);
 
 create table upload_part (

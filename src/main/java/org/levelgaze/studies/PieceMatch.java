@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.Consumer;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.sets.EditionPiece;
 import org.levelgaze.sets.TrueState;
@@ -19,10 +20,17 @@ final class PieceMatch {
     private final Map<String, EditionPiece> edition = new HashMap<>();
     private final List<RowError> bad = new ArrayList<>();
     private final String set;
+    private final Consumer<RowError> sink;
     private long count;
 
     PieceMatch(String set, List<EditionPiece> pieces) {
+        this(set, pieces, error -> {});
+    }
+
+    /** Hands every bad row on as it is found. */
+    PieceMatch(String set, List<EditionPiece> pieces, Consumer<RowError> sink) {
         this.set = set;
+        this.sink = sink;
         pieces.forEach(piece -> edition.put(piece.label(), piece));
     }
 
@@ -32,6 +40,19 @@ final class PieceMatch {
      * @throws Refusal with every bad row when one is unknown or its true state disagrees
      */
     List<StudyPiece> match(List<RecordedPiece> pieces) {
+        List<StudyPiece> matched = compare(pieces);
+        if (count > 0) {
+            throw new Refusal(Refusal.Kind.INVALID, "file-does-not-fit-set", List.of(set, count), bad, count);
+        }
+        return matched;
+    }
+
+    /** Hands every bad row to the sink and refuses nothing. */
+    void misfits(List<RecordedPiece> pieces) {
+        compare(pieces);
+    }
+
+    private List<StudyPiece> compare(List<RecordedPiece> pieces) {
         List<StudyPiece> matched = new ArrayList<>();
         for (RecordedPiece piece : pieces) {
             EditionPiece known = edition.get(piece.label());
@@ -42,9 +63,6 @@ final class PieceMatch {
                 matched.add(new StudyPiece(
                         matched.size(), known.id(), known.label(), known.trueState(), known.defectKind()));
             }
-        }
-        if (count > 0) {
-            throw new Refusal(Refusal.Kind.INVALID, "file-does-not-fit-set", List.of(set, count), bad, count);
         }
         return matched;
     }
@@ -68,8 +86,10 @@ final class PieceMatch {
 
     private void bad(RecordedPiece piece, String column, String value, String message, Object... arguments) {
         count++;
+        RowError error = new RowError(piece.row(), column, value, message, List.of(arguments));
+        sink.accept(error);
         if (bad.size() < KEPT) {
-            bad.add(new RowError(piece.row(), column, value, message, List.of(arguments)));
+            bad.add(error);
         }
     }
 }

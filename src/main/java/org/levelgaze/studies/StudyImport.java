@@ -6,18 +6,21 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.function.Consumer;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.journal.Actor;
 import org.levelgaze.register.Appraiser;
 import org.levelgaze.register.Task;
 import org.levelgaze.register.Tasks;
 import org.levelgaze.sets.Basis;
+import org.levelgaze.sets.EditionPiece;
 import org.levelgaze.sets.NewPiece;
 import org.levelgaze.sets.NewSet;
 import org.levelgaze.sets.ReferenceSet;
 import org.levelgaze.sets.ReferenceSets;
 import org.levelgaze.sets.TrueState;
 import org.levelgaze.shared.Refusal;
+import org.levelgaze.shared.RowError;
 import org.levelgaze.shared.SiteId;
 import org.levelgaze.shared.Sites;
 import org.levelgaze.studies.reading.RecordedCalls;
@@ -73,6 +76,22 @@ public class StudyImport {
                 participants.configurations(site, taking, request.configuration(), request.performedOn());
         ReferenceSet used = set.orElseGet(() -> makeSet(actor, task, request, calls));
         return new ImportOutcome.Stored(writer.write(actor, request, used, taking, configurations, calls, watcher));
+    }
+
+    /**
+     * Names every piece of a file that does not fit a known set, also those beyond the first that a refusal lists. What
+     * it names tells true states apart, so it is for those who may see them.
+     *
+     * @param set the set's code; an unknown one takes any piece
+     * @param calls what stands in the file
+     * @param badRows given every row, in the order of the pieces
+     */
+    public void findMisfits(SiteId site, String set, RecordedCalls calls, Consumer<RowError> badRows) {
+        sets.byCode(site, set).ifPresent(known -> {
+            List<EditionPiece> pieces =
+                    sets.piecesForScoring(known, sets.newest(known).number());
+            new PieceMatch(set, pieces, badRows).misfits(calls.pieces());
+        });
     }
 
     private void refuseDayAhead(SiteId site, LocalDate performedOn) {

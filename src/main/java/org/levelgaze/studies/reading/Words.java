@@ -37,8 +37,23 @@ public record Words(Set<String> accept, Set<String> reject, Set<String> good, Se
         return STANDARD;
     }
 
+    /** These words and, beside them, the known words of the trade that they leave open; 1 and 0 are not among those. */
+    public Words withKnown() {
+        return new Words(
+                with(KnownWords.ACCEPT, accept, reject),
+                with(KnownWords.REJECT, reject, accept),
+                with(KnownWords.ACCEPT, good, defective),
+                with(KnownWords.REJECT, defective, good));
+    }
+
+    private static Set<String> with(Set<String> known, Set<String> own, Set<String> others) {
+        Set<String> all = new LinkedHashSet<>(own);
+        known.stream().filter(word -> !others.contains(word)).sorted().forEach(all::add);
+        return all;
+    }
+
     /** The form in which words are compared. */
-    static String plain(String word) {
+    public static String plain(String word) {
         return word.strip().toLowerCase(Locale.ROOT);
     }
 

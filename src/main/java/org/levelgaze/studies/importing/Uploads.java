@@ -1,16 +1,19 @@
-package org.levelgaze.studies;
+package org.levelgaze.studies.importing;
 
 import java.io.IOException;
 import java.io.InputStream;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.sql.Timestamp;
+import java.sql.Types;
 import java.time.Clock;
 import java.time.Duration;
 import java.time.Instant;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.UUID;
+import java.util.concurrent.CancellationException;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.journal.Actor;
 import org.levelgaze.shared.Refusal;
@@ -18,6 +21,7 @@ import org.levelgaze.shared.SiteId;
 import org.springframework.beans.factory.annotation.Value;
 import org.springframework.jdbc.core.simple.JdbcClient;
 import org.springframework.stereotype.Repository;
+import org.springframework.transaction.annotation.Propagation;
 import org.springframework.transaction.annotation.Transactional;
 import org.springframework.util.unit.DataSize;
 
@@ -27,14 +31,21 @@ class Uploads {
 
     static final Duration KEPT = Duration.ofDays(1);
 
+    /** A run that gives no sign of life for so long was cut off, by a stop of the program or of its machine. */
+    static final Duration SILENT = Duration.ofMinutes(1);
+
     private static final int PART = 1 << 20;
     private static final int LONGEST_NAME = 300;
     private static final String SELECT = """
-            select site_id, upload_id, owner, file_name, bytes, uploaded_at, state, request, rows_done, bytes_done,
-                   study_id, problem
+            select site_id, upload_id, owner, file_name, bytes, uploaded_at, request, rows_done, bytes_done,
+                   calls_in_all, run_no, study_id, problem,
+                   case when state = 'running' and changed_at < :silentSince then 'broken' else state end as state
               from upload
-             where site_id = :site
+             where site_id = :site and owner = :owner
             """;
+
+    private static final String OF_RUN =
+            " where site_id = :site and upload_id = :id and state = 'running' and run_no = :run";
 
     private final JdbcClient jdbc;
     private final Clock clock;
@@ -93,27 +104,43 @@ class Uploads {
         return bytes;
     }
 
+    /** The most bytes that a file may have. */
+    long largest() {
+        return largest.toBytes();
+    }
+
     Refusal tooLarge() {
         return new Refusal(Refusal.Kind.TOO_LARGE, "upload-too-large", largest.toMegabytes());
     }
 
-    /** The upload, if this actor brought it. */
-    Optional<Upload> find(Actor actor, UUID id) {
-        return jdbc.sql(SELECT + " and upload_id = :id and owner = :owner")
+    /**
+     * The upload, if this actor brought it.
+     *
+     * @throws Refusal when there is none, or somebody else brought it
+     */
+    Upload get(Actor actor, UUID id) {
+        return jdbc.sql(SELECT + " and upload_id = :id")
                 .param("site", actor.site().value())
-                .param("id", id)
                 .param("owner", actor.who())
+                .param("silentSince", silentSince())
+                .param("id", id)
                 .query(Uploads::toUpload)
-                .optional();
+                .optional()
+                .orElseThrow(() -> new Refusal(Refusal.Kind.NOT_FOUND, "unknown-upload"));
     }
 
     /** What this actor has brought and not taken away, the latest first. */
     List<Upload> open(Actor actor) {
-        return jdbc.sql(SELECT + " and owner = :owner and state <> 'done' order by uploaded_at desc limit 20")
+        return jdbc.sql(SELECT + " and state <> 'done' order by uploaded_at desc limit 20")
                 .param("site", actor.site().value())
                 .param("owner", actor.who())
+                .param("silentSince", silentSince())
                 .query(Uploads::toUpload)
                 .list();
+    }
+
+    private Timestamp silentSince() {
+        return Timestamp.from(clock.instant().minus(SILENT));
     }
 
     /** Reads the file's bytes, part by part. */
@@ -131,84 +158,108 @@ class Uploads {
                 .orElse(null);
     }
 
-    /** Moves a waiting or refused upload to running; false when somebody else already has. */
+    /**
+     * Starts a run of an upload that has none; of two clicks at once only one comes through.
+     *
+     * @param request what the user said the file means, as JSON
+     * @return the upload with its run; none when somebody else was first
+     */
     @Transactional
-    boolean start(Upload upload, String request) {
-        return jdbc.sql("""
+    Optional<Upload> start(Actor actor, Upload upload, String request) {
+        int started = jdbc.sql("""
                 update upload set state = 'running', request = :request, rows_done = 0, bytes_done = 0,
-                       cancel_wanted = false, problem = null, changed_at = :now
-                 where site_id = :site and upload_id = :id and state in ('waiting', 'refused', 'cancelled', 'broken')""")
-                        .param("request", request)
-                        .param("now", Timestamp.from(clock.instant()))
-                        .param("site", upload.site().value())
-                        .param("id", upload.id())
-                        .update()
-                == 1;
-    }
-
-    /** Notes how far the reading is. */
-    @Transactional
-    void progress(Upload upload, long rows, long bytes) {
-        jdbc.sql("""
-                update upload set rows_done = :rows, bytes_done = :bytes, changed_at = :now
-                 where site_id = :site and upload_id = :id and state = 'running'""")
-                .param("rows", rows)
-                .param("bytes", bytes)
+                       calls_in_all = null, run_no = run_no + 1, cancel_wanted = false, problem = null, changed_at = :now
+                 where site_id = :site and upload_id = :id
+                   and (state in ('waiting', 'refused', 'cancelled', 'broken')
+                        or state = 'running' and changed_at < :silentSince)""")
+                .param("request", request)
                 .param("now", Timestamp.from(clock.instant()))
                 .param("site", upload.site().value())
                 .param("id", upload.id())
+                .param("silentSince", silentSince())
                 .update();
+        return started == 1 ? Optional.of(get(actor, upload.id())) : Optional.empty();
     }
 
-    boolean cancelWanted(Upload upload) {
-        return jdbc.sql("select cancel_wanted from upload where site_id = :site and upload_id = :id")
-                .param("site", upload.site().value())
-                .param("id", upload.id())
+    /**
+     * Notes how far a run is, at once and whatever becomes of the transaction around it.
+     *
+     * @param rows rows read, or calls stored once {@code callsInAll} is known
+     * @param bytes bytes read
+     * @param callsInAll calls to store; null while the file is being read
+     * @return whether to go on: nobody wants it stopped, and no later run has taken over
+     */
+    @Transactional(propagation = Propagation.REQUIRES_NEW)
+    boolean progress(Upload run, long rows, long bytes, @Nullable Long callsInAll) {
+        return jdbc.sql("""
+                update upload set rows_done = :rows, bytes_done = :bytes, calls_in_all = :calls, changed_at = :now
+                """ + OF_RUN + " returning not cancel_wanted")
+                .param("rows", rows)
+                .param("bytes", bytes)
+                .param("calls", callsInAll, Types.BIGINT)
+                .param("now", Timestamp.from(clock.instant()))
+                .params(ofRun(run))
                 .query(Boolean.class)
                 .optional()
-                .orElse(true);
+                .orElse(false);
+    }
+
+    /** A sign of life of a run that waits for its turn or is busy with one long step. */
+    @Transactional
+    void touch(Upload run) {
+        jdbc.sql("update upload set changed_at = :now" + OF_RUN)
+                .param("now", Timestamp.from(clock.instant()))
+                .params(ofRun(run))
+                .update();
     }
 
     @Transactional
     void wantCancel(Upload upload) {
-        jdbc.sql(
-                        "update upload set cancel_wanted = true where site_id = :site and upload_id = :id and state = 'running'")
+        jdbc.sql("""
+                update upload set cancel_wanted = true
+                 where site_id = :site and upload_id = :id and state = 'running'""")
                 .param("site", upload.site().value())
                 .param("id", upload.id())
                 .update();
     }
 
-    /** Ends a run without a study. */
+    /** Ends a run without a study; does nothing when a later run has taken over. */
     @Transactional
-    void end(Upload upload, Upload.State state, @Nullable String problem) {
-        jdbc.sql("""
-                update upload set state = :state, problem = :problem, changed_at = :now
-                 where site_id = :site and upload_id = :id""")
+    void end(Upload run, Upload.State state, @Nullable String problem) {
+        jdbc.sql("update upload set state = :state, problem = :problem, changed_at = :now" + OF_RUN)
                 .param("state", state.word())
                 .param("problem", problem)
                 .param("now", Timestamp.from(clock.instant()))
-                .param("site", upload.site().value())
-                .param("id", upload.id())
+                .params(ofRun(run))
                 .update();
     }
 
-    /** Ends a run with its study and lets the bytes go; part of the study's own transaction. */
+    /**
+     * Ends a run with its study and lets the bytes go; part of the study's own transaction.
+     *
+     * @throws CancellationException when a later run has taken over: the study must not be stored
+     */
     @Transactional
-    void done(Upload upload, long study) {
-        jdbc.sql("""
-                update upload set state = 'done', study_id = :study, changed_at = :now
-                 where site_id = :site and upload_id = :id""")
+    void done(Upload run, long study) {
+        int ended = jdbc.sql("update upload set state = 'done', study_id = :study, changed_at = :now" + OF_RUN)
                 .param("study", study)
                 .param("now", Timestamp.from(clock.instant()))
-                .param("site", upload.site().value())
-                .param("id", upload.id())
+                .params(ofRun(run))
                 .update();
+        if (ended == 0) {
+            throw new CancellationException("A later run of the same upload has taken over");
+        }
         jdbc.sql("delete from upload_part where site_id = :site and upload_id = :id")
-                .param("site", upload.site().value())
-                .param("id", upload.id())
+                .param("site", run.site().value())
+                .param("id", run.id())
                 .update();
     }
 
+    private static Map<String, Object> ofRun(Upload run) {
+        return Map.of("site", run.site().value(), "id", run.id(), "run", run.run());
+    }
+
+    /** Takes a file away that nothing is being done with. */
     @Transactional
     void forget(Upload upload) {
         jdbc.sql("delete from upload where site_id = :site and upload_id = :id and state <> 'running'")
@@ -223,13 +274,6 @@ class Uploads {
         Instant before = clock.instant().minus(KEPT);
         return jdbc.sql("delete from upload where changed_at < :before")
                 .param("before", Timestamp.from(before))
-                .update();
-    }
-
-    /** Runs that a stop of the program cut off can be started again. */
-    @Transactional
-    int breakOffRuns() {
-        return jdbc.sql("update upload set state = 'broken' where state = 'running'")
                 .update();
     }
 
@@ -250,6 +294,8 @@ class Uploads {
                 row.getString("request"),
                 row.getLong("rows_done"),
                 row.getLong("bytes_done"),
+                row.getObject("calls_in_all", Long.class),
+                row.getInt("run_no"),
                 study == 0 ? null : study,
                 row.getString("problem"));
     }

@@ -1,4 +1,4 @@
-package org.levelgaze.studies;
+package org.levelgaze.studies.importing;
 
 import java.io.InputStream;
 import org.jspecify.annotations.Nullable;

@@ -1,4 +1,4 @@
-package org.levelgaze.studies;
+package org.levelgaze.studies.importing;
 
 import java.time.Instant;
 import java.util.Locale;
@@ -18,6 +18,8 @@ import org.levelgaze.shared.SiteId;
  * @param request what the user said it means, as JSON; null before that
  * @param rowsDone rows read in the run under way or the last one
  * @param bytesDone bytes read in the run under way or the last one
+ * @param callsInAll calls to store, once the file is read, and {@code rowsDone} then counts calls; null before that
+ * @param run the number of the run under way or the last one
  * @param studyId the study it became; null before that
  * @param problem why the last run stored nothing, as JSON; null: no such run
  */
@@ -31,6 +33,8 @@ record Upload(
         @Nullable String request,
         long rowsDone,
         long bytesDone,
+        @Nullable Long callsInAll,
+        int run,
         @Nullable Long studyId,
         @Nullable String problem) {
 
@@ -58,8 +62,19 @@ record Upload(
         }
     }
 
-    /** How much of the file has been read, 0 to 100. */
+    /** How far the reading or the storing is, 0 to 100. */
     int percent() {
-        return bytes == 0 ? 0 : (int) Math.min(100, bytesDone * 100 / bytes);
+        long whole = callsInAll == null ? bytes : callsInAll;
+        long part = callsInAll == null ? bytesDone : rowsDone;
+        return whole == 0 ? 0 : (int) Math.min(100, part * 100 / whole);
+    }
+
+    /** Whether the file is read and its calls are being stored. */
+    boolean storing() {
+        return callsInAll != null;
+    }
+
+    boolean running() {
+        return state == State.RUNNING;
     }
 }
