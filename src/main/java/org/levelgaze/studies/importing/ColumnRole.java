@@ -14,8 +14,8 @@ enum ColumnRole {
     CALL,
     SEEN;
 
-    /** The word for it in forms and in the keys of its texts. */
-    String word() {
+    /** The word for it in forms and in the keys of its texts; called by templates. */
+    public String word() {
         return name().toLowerCase(Locale.ROOT);
     }
 

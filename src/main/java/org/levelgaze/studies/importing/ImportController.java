@@ -7,6 +7,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.UUID;
+import org.jspecify.annotations.Nullable;
 import org.levelgaze.journal.Actor;
 import org.levelgaze.shared.Refusal;
 import org.levelgaze.studies.reading.Limits;
@@ -55,19 +56,33 @@ class ImportController {
     }
 
     @GetMapping
-    String choose(Actor actor, Model model) {
-        return pages.choose(actor, model);
+    String choose(Actor actor, @RequestParam(required = false) @Nullable UUID instead, Model model) {
+        return pages.choose(actor, instead, model);
     }
 
+    /**
+     * Keeps a file and asks what it is.
+     *
+     * @param instead the file that this one replaces; what was said about that one holds on
+     */
     @PostMapping
-    String keep(Actor actor, @RequestParam MultipartFile file, Model model, HttpServletResponse response)
+    String keep(
+            Actor actor,
+            @RequestParam MultipartFile file,
+            @RequestParam(required = false) @Nullable UUID instead,
+            Model model,
+            HttpServletResponse response)
             throws IOException {
         try (InputStream content = file.getInputStream()) {
-            return "redirect:/studies/import/" + keep(actor, file, content);
+            UUID kept = keep(actor, file, content);
+            if (instead != null) {
+                uploads.replace(actor, instead, kept);
+            }
+            return "redirect:/studies/import/" + kept;
         } catch (Refusal refusal) {
             response.setStatus(HttpStatus.UNPROCESSABLE_CONTENT.value());
             model.addAttribute("refusal", refusal);
-            return pages.choose(actor, model);
+            return pages.choose(actor, instead, model);
         }
     }
 

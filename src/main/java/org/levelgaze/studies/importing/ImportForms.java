@@ -39,7 +39,9 @@ class ImportForms {
 
     /** The form as the user left it, or the first one. */
     ImportForm found(Actor actor, Upload upload, Sketch sketch) {
-        ImportForm typed = papers.order(upload).map(ImportOrder::form).orElseGet(() -> guessed(sketch));
+        ImportForm typed = papers.order(upload)
+                .map(order -> upload.state() == Upload.State.WAITING ? forAnotherFile(order, sketch) : order.form())
+                .orElseGet(() -> guessed(sketch));
         Refusal refusal = papers.problem(upload).map(ImportProblem::refusal).orElse(null);
         return filled(actor, typed, sketch, refusal == null ? List.of() : refusal.rows());
     }
@@ -58,6 +60,27 @@ class ImportForms {
                 Answers.words(
                         sketch.columns(), columns, ColumnRole.REFERENCE, List.of(), Answers.ofTruths(guess.words())),
                 "");
+    }
+
+    /** What was said about a file that another one replaces, as far as it can hold for that one. */
+    private static ImportForm forAnotherFile(ImportOrder order, Sketch sketch) {
+        Mapping said = order.mapping();
+        if (!Answers.fits(said.layout(), sketch)) {
+            ImportForm guessed = guessed(sketch);
+            return order.form()
+                    .withMeaning(
+                            guessed.columns(),
+                            order.form().callWords(),
+                            order.form().truthWords(),
+                            order.form().task());
+        }
+        List<ColumnChoice> columns = Answers.columns(said.layout(), sketch.columns());
+        return order.form()
+                .withMeaning(
+                        columns,
+                        order.form().callWords(),
+                        order.form().truthWords(),
+                        order.form().task());
     }
 
     private ImportForm filled(Actor actor, ImportForm typed, Sketch sketch, List<RowError> bad) {
@@ -139,7 +162,7 @@ class ImportForms {
     }
 
     private static String chosenSet(ImportForm form, String task, List<ReferenceSet> known) {
-        if (task.isEmpty() || form.hasNewSet() && task.equals(form.mappedTask())) {
+        if (task.isEmpty() || (form.hasNewSet() && task.equals(form.mappedTask()))) {
             return form.set();
         }
         boolean stillThere =

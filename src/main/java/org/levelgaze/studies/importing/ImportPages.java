@@ -6,6 +6,8 @@ import java.util.LinkedHashMap;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.UUID;
+import org.jspecify.annotations.Nullable;
 import org.levelgaze.journal.Actor;
 import org.levelgaze.shared.Refusal;
 import org.levelgaze.shared.Sites;
@@ -35,8 +37,13 @@ class ImportPages {
         this.messages = messages;
     }
 
-    /** The page on which a file is chosen. */
-    String choose(Actor actor, Model model) {
+    /**
+     * The page on which a file is chosen.
+     *
+     * @param instead the upload that it is to replace; null: none
+     */
+    String choose(Actor actor, @Nullable UUID instead, Model model) {
+        model.addAttribute("instead", instead);
         model.addAttribute("uploads", uploads.open(actor));
         model.addAttribute("largest", uploads.largest());
         return "studies/import-choose";
@@ -79,12 +86,9 @@ class ImportPages {
         model.addAttribute("tasks", tasks(actor, locale));
         model.addAttribute("sets", sets(actor, typed == null ? "" : typed.task(), locale));
         model.addAttribute("roles", ColumnRole.values());
-        papers.problem(upload).map(ImportProblem::refusal).ifPresent(refusal -> refused(refusal, model));
+        Optional<Refusal> refusal = papers.problem(upload).map(ImportProblem::refusal);
+        model.addAttribute("refusal", form.hasErrors() ? null : refusal.orElse(null));
         return "studies/import-form";
-    }
-
-    private static void refused(Refusal refusal, Model model) {
-        model.addAttribute("refusal", refusal);
     }
 
     /** The page that asks before anything new is entered. */

@@ -70,7 +70,7 @@ class ImportRunController {
         }
         if (typed.saysSlip()) {
             flash.addFlashAttribute("notice", "studies.import.slip.notice");
-            return "redirect:/studies/import";
+            return "redirect:/studies/import?instead=" + id;
         }
         return answer(actor, upload, asked.get(), typed, model, response);
     }

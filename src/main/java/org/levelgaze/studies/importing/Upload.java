@@ -7,7 +7,7 @@ import org.jspecify.annotations.Nullable;
 import org.levelgaze.shared.SiteId;
 
 /**
- * A file on its way to a study.
+ * A file on its way to a study. Public methods are called by templates.
  *
  * @param site where
  * @param id its number, not to be guessed
@@ -53,7 +53,7 @@ record Upload(
         /** The program stopped during the run. */
         BROKEN;
 
-        String word() {
+        public String word() {
             return name().toLowerCase(Locale.ROOT);
         }
 
@@ -63,18 +63,18 @@ record Upload(
     }
 
     /** How far the reading or the storing is, 0 to 100. */
-    int percent() {
+    public int percent() {
         long whole = callsInAll == null ? bytes : callsInAll;
         long part = callsInAll == null ? bytesDone : rowsDone;
         return whole == 0 ? 0 : (int) Math.min(100, part * 100 / whole);
     }
 
     /** Whether the file is read and its calls are being stored. */
-    boolean storing() {
+    public boolean storing() {
         return callsInAll != null;
     }
 
-    boolean running() {
+    public boolean running() {
         return state == State.RUNNING;
     }
 }

@@ -259,6 +259,18 @@ class Uploads {
         return Map.of("site", run.site().value(), "id", run.id(), "run", run.run());
     }
 
+    /** Lets a file take the place of another, with what was said about it. */
+    @Transactional
+    void replace(Actor actor, UUID former, UUID latter) {
+        Upload old = get(actor, former);
+        jdbc.sql("update upload set request = :request where site_id = :site and upload_id = :id")
+                .param("request", old.request())
+                .param("site", actor.site().value())
+                .param("id", latter)
+                .update();
+        forget(old);
+    }
+
     /** Takes a file away that nothing is being done with. */
     @Transactional
     void forget(Upload upload) {
