@@ -6,6 +6,7 @@ import java.net.URI;
 import java.time.Instant;
 import java.time.LocalDate;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.journal.Actor;
@@ -14,15 +15,18 @@ import org.levelgaze.register.Tasks;
 import org.levelgaze.sets.ReferenceSets;
 import org.levelgaze.shared.Listing;
 import org.levelgaze.shared.Refusal;
+import org.levelgaze.shared.RowError;
 import org.levelgaze.studies.reading.CallReader;
 import org.levelgaze.studies.reading.Reading;
 import org.levelgaze.studies.reading.RecordedCalls;
 import org.levelgaze.studies.reading.Watcher;
+import org.springframework.http.HttpHeaders;
 import org.springframework.http.MediaType;
 import org.springframework.http.ResponseEntity;
 import org.springframework.web.bind.annotation.GetMapping;
 import org.springframework.web.bind.annotation.PathVariable;
 import org.springframework.web.bind.annotation.PostMapping;
+import org.springframework.web.bind.annotation.RequestHeader;
 import org.springframework.web.bind.annotation.RequestMapping;
 import org.springframework.web.bind.annotation.RequestParam;
 import org.springframework.web.bind.annotation.RestController;
@@ -32,18 +36,29 @@ import org.springframework.web.bind.annotation.RestController;
 @RequestMapping("/api/v1/studies")
 class StudyApi {
 
+    /** Bad rows that one answer lists; a program that sends more of them has another fault than those rows. */
+    private static final int BAD_ROWS = 10_000;
+
     private final StudyImport imports;
     private final Studies studies;
     private final Tasks tasks;
     private final ReferenceSets sets;
     private final Appraisers appraisers;
+    private final LargestFile largest;
 
-    StudyApi(StudyImport imports, Studies studies, Tasks tasks, ReferenceSets sets, Appraisers appraisers) {
+    StudyApi(
+            StudyImport imports,
+            Studies studies,
+            Tasks tasks,
+            ReferenceSets sets,
+            Appraisers appraisers,
+            LargestFile largest) {
         this.imports = imports;
         this.studies = studies;
         this.tasks = tasks;
         this.sets = sets;
         this.appraisers = appraisers;
+        this.largest = largest;
     }
 
     /** Who took part: {@code configuration} is the label that the study names, null when it names none. */
@@ -72,11 +87,13 @@ class StudyApi {
             @RequestParam(required = false) @Nullable String configuration,
             @RequestParam(defaultValue = "true") boolean conclude,
             @RequestParam(defaultValue = "false") boolean create,
+            @RequestHeader(name = HttpHeaders.CONTENT_LENGTH, defaultValue = "-1") long length,
             InputStream body)
             throws IOException {
+        RecordedCalls calls = read(largest.within(body, length));
         Consent consent = create ? Consent.EVERYTHING_NEW : Consent.NOTHING;
         StudyRequest request = new StudyRequest(task, set, performedOn, configuration, conclude, "", consent);
-        StudyHead stored = stored(request, imports.take(actor, request, read(body), Watcher.NONE));
+        StudyHead stored = stored(request, imports.take(actor, request, calls, Watcher.NONE));
         return ResponseEntity.created(URI.create("/api/v1/studies/" + stored.id()))
                 .body(answer(studies.get(actor.site(), stored.id())));
     }
@@ -117,14 +134,15 @@ class StudyApi {
     }
 
     private static RecordedCalls read(InputStream body) throws IOException {
-        Reading reading = CallReader.standard().read(body);
+        List<RowError> bad = new ArrayList<>();
+        Reading reading = CallReader.standard().read(body, Watcher.NONE, row -> {
+            if (bad.size() < BAD_ROWS) {
+                bad.add(row);
+            }
+        });
         if (reading instanceof Reading.Refused refused) {
-            throw new Refusal(
-                    Refusal.Kind.INVALID,
-                    "bad-rows",
-                    List.of(Long.toString(refused.inAll())),
-                    refused.first(),
-                    refused.inAll());
+            bad.sort(Comparator.comparingLong(RowError::row));
+            throw new Refusal(Refusal.Kind.INVALID, "bad-rows", List.of(refused.inAll()), bad, refused.inAll());
         }
         return ((Reading.Read) reading).calls();
     }

@@ -12,8 +12,6 @@ import org.levelgaze.journal.Actor;
 import org.levelgaze.shared.Refusal;
 import org.levelgaze.studies.reading.Limits;
 import org.levelgaze.studies.reading.Sketch;
-import org.springframework.core.io.ClassPathResource;
-import org.springframework.core.io.Resource;
 import org.springframework.http.ContentDisposition;
 import org.springframework.http.HttpHeaders;
 import org.springframework.http.HttpStatus;
@@ -141,12 +139,21 @@ class ImportController {
         return "redirect:/studies/import";
     }
 
-    @GetMapping("/example-{shape:long|wide}.csv")
-    ResponseEntity<Resource> example(@PathVariable String shape) {
+    @GetMapping("/example-long.csv")
+    ResponseEntity<String> longExample() {
+        return example(Examples.LONG);
+    }
+
+    @GetMapping("/example-wide.csv")
+    ResponseEntity<String> wideExample() {
+        return example(Examples.WIDE);
+    }
+
+    private static ResponseEntity<String> example(Examples example) {
         return ResponseEntity.ok()
                 .contentType(new MediaType("text", "csv", StandardCharsets.UTF_8))
-                .header(HttpHeaders.CONTENT_DISPOSITION, attachment("example-" + shape + ".csv"))
-                .body(new ClassPathResource("studies/example-" + shape + ".csv"));
+                .header(HttpHeaders.CONTENT_DISPOSITION, attachment(example.fileName()))
+                .body(example.text());
     }
 
     static String attachment(String name) {

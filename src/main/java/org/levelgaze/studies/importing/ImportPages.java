@@ -46,6 +46,8 @@ class ImportPages {
         model.addAttribute("instead", instead);
         model.addAttribute("uploads", uploads.open(actor));
         model.addAttribute("largest", uploads.largest());
+        model.addAttribute("longExample", Examples.LONG.text());
+        model.addAttribute("wideExample", Examples.WIDE.text());
         return "studies/import-choose";
     }
 

@@ -18,12 +18,11 @@ import org.jspecify.annotations.Nullable;
 import org.levelgaze.journal.Actor;
 import org.levelgaze.shared.Refusal;
 import org.levelgaze.shared.SiteId;
-import org.springframework.beans.factory.annotation.Value;
+import org.levelgaze.studies.LargestFile;
 import org.springframework.jdbc.core.simple.JdbcClient;
 import org.springframework.stereotype.Repository;
 import org.springframework.transaction.annotation.Propagation;
 import org.springframework.transaction.annotation.Transactional;
-import org.springframework.util.unit.DataSize;
 
 /** Files on their way to a study: kept in the database in parts until it is known what they mean, or for a day. */
 @Repository
@@ -49,9 +48,9 @@ class Uploads {
 
     private final JdbcClient jdbc;
     private final Clock clock;
-    private final DataSize largest;
+    private final LargestFile largest;
 
-    Uploads(JdbcClient jdbc, Clock clock, @Value("${levelgaze.import.largest-file}") DataSize largest) {
+    Uploads(JdbcClient jdbc, Clock clock, LargestFile largest) {
         this.jdbc = jdbc;
         this.clock = clock;
         this.largest = largest;
@@ -75,7 +74,7 @@ class Uploads {
                 .param("file", shortened(fileName))
                 .param("now", now)
                 .update();
-        long bytes = keepParts(actor.site(), id, content);
+        long bytes = keepParts(actor.site(), id, largest.within(content, -1));
         jdbc.sql("update upload set bytes = :bytes where site_id = :site and upload_id = :id")
                 .param("bytes", bytes)
                 .param("site", actor.site().value())
@@ -90,9 +89,6 @@ class Uploads {
         byte[] part = content.readNBytes(PART);
         while (part.length > 0) {
             bytes += part.length;
-            if (bytes > largest.toBytes()) {
-                throw tooLarge();
-            }
             jdbc.sql("insert into upload_part (site_id, upload_id, part_no, content) values (:site, :id, :no, :part)")
                     .param("site", site.value())
                     .param("id", id)
@@ -106,11 +102,7 @@ class Uploads {
 
     /** The most bytes that a file may have. */
     long largest() {
-        return largest.toBytes();
-    }
-
-    Refusal tooLarge() {
-        return new Refusal(Refusal.Kind.TOO_LARGE, "upload-too-large", largest.toMegabytes());
+        return largest.bytes();
     }
 
     /**
