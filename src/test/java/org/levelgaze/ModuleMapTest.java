@@ -11,6 +11,7 @@ import java.nio.file.Path;
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.regex.Pattern;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.springframework.modulith.ApplicationModule;
 import org.springframework.modulith.core.ApplicationModules;
@@ -58,5 +59,17 @@ class ModuleMapTest {
 
     private static String uses(String[] modules) {
         return modules.length == 0 ? "nothing" : String.join(", ", modules);
+    }
+
+    /** Java would load the test's one first, and the arrows that the module declares in the other would not be seen. */
+    @Test
+    void noPackageIsDescribedInBothTrees() throws IOException {
+        Path tests = Path.of("src/test/java");
+        try (Stream<Path> files = Files.walk(tests)) {
+            assertThat(files.filter(file -> file.endsWith("package-info.java"))
+                            .filter(file ->
+                                    Files.exists(Path.of("src/main/java").resolve(tests.relativize(file)))))
+                    .isEmpty();
+        }
     }
 }

@@ -342,6 +342,21 @@ class StudyImportTest {
     }
 
     @Test
+    void letsTheDatabaseRefuseACallThatBelongsToNothing() {
+        StudyHead study = take(Consent.EVERYTHING_NEW, twoPieces(ana, "accept"));
+
+        for (String stray : List.of("7, 0, null", "0, 7, null", "0, 0, 7")) {
+            assertThatThrownBy(() -> jdbc.sql(
+                                    "insert into study_call (site_id, study_id, trial, appraiser_no, piece_no, kind_no, accepted) values (1, "
+                                            + study.id() + ", 2, " + stray + ", true)")
+                            .update())
+                    .as(stray)
+                    .rootCause()
+                    .hasMessageContaining("that its study does not have");
+        }
+    }
+
+    @Test
     void neverLetsTheProgramChangeACall() {
         take(Consent.EVERYTHING_NEW, twoPieces(ana, "accept"));
 

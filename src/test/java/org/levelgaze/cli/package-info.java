@@ -1,5 +1,0 @@
-/** Tests of the commands. */
-@NullMarked
-package org.levelgaze.cli;
-
-import org.jspecify.annotations.NullMarked;

@@ -1,5 +1,0 @@
-/** Tests of the shell. */
-@NullMarked
-package org.levelgaze.site;
-
-import org.jspecify.annotations.NullMarked;
