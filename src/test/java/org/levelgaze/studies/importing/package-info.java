@@ -1,5 +1,0 @@
-/** Imports as a user sees them: pages, questions, bad rows, two tabs at once. */
-@NullMarked
-package org.levelgaze.studies.importing;
-
-import org.jspecify.annotations.NullMarked;
