@@ -74,11 +74,17 @@ final class Routes {
         add(POST, people(Permission.WRITE), "/studies/import", "/studies/import/**");
         add(GET, people(Permission.READ), "/studies", "/studies/{id}", "/studies/{id}/summary");
         add(GET, people(Permission.READ), "/studies/{id}/findings.json");
+        add(POST, people(Permission.WRITE), "/studies/{id}/conclusion");
         add(GET, people(Permission.TRUE_STATES), "/studies/{id}/pieces");
+        add(POST, people(Permission.TRUE_STATES), "/studies/{id}/pieces");
         add(GET, people(Permission.TRUE_STATES), "/studies/{id}/calls.csv", "/studies/{id}/workbook.xlsx");
         add(GET, people(Permission.READ), "/appraisers", "/appraisers/{code}");
+        add(POST, people(Permission.WRITE), "/appraisers", "/appraisers/{code}/configurations");
         add(GET, people(Permission.READ), "/tasks", "/tasks/{code}");
+        add(POST, people(Permission.WRITE), "/tasks");
         add(GET, people(Permission.READ), "/sets", "/sets/{code}");
+        add(GET, people(Permission.TRUE_STATES), "/sets/{code}/key");
+        add(POST, people(Permission.TRUE_STATES), "/sets/{code}/key");
         add(GET, people(Permission.JOURNAL), "/journal", "/journal/verification");
     }
 

@@ -40,7 +40,14 @@ public record BiasRatio(
         }
     }
 
-    static BiasRatio of(Share falseReject, Share falseAccept, double confidence) {
+    /**
+     * The ratio of two shares.
+     *
+     * @param falseReject rejects of good pieces
+     * @param falseAccept accepts of defective pieces
+     * @param confidence level of the interval, above 0 and below 1
+     */
+    public static BiasRatio of(Share falseReject, Share falseAccept, double confidence) {
         Double rejects = falseReject.value();
         Double accepts = falseAccept.value();
         Double ofCounts = falseAccept.k() == 0 ? null : (double) falseReject.k() / falseAccept.k();

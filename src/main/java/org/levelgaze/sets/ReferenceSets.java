@@ -103,6 +103,12 @@ public class ReferenceSets {
         return rows.pieces(set, edition);
     }
 
+    /** Whether this reading would not be the first of whoever asks. */
+    public boolean hasReadKey(Actor actor, ReferenceSet set, int edition) {
+        return keyReadings(set, edition).stream()
+                .anyMatch(reading -> reading.who().equals(actor.who()));
+    }
+
     /** Who has seen the answer key of an edition, in the order of the first reading. */
     public List<KeyReading> keyReadings(ReferenceSet set, int edition) {
         return rows.keyReadings(set, edition);

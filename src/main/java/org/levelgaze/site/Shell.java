@@ -3,6 +3,7 @@ package org.levelgaze.site;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.function.Predicate;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.shared.Refusal;
 import org.levelgaze.shared.RowError;
@@ -20,14 +21,23 @@ public final class Shell {
     private final String query;
     private final @Nullable String who;
     private final List<Place> places;
+    private final Predicate<String> rights;
 
-    Shell(Sentences words, Locale locale, String theme, String query, @Nullable String who, List<Place> places) {
+    Shell(
+            Sentences words,
+            Locale locale,
+            String theme,
+            String query,
+            @Nullable String who,
+            List<Place> places,
+            Predicate<String> rights) {
         this.words = words;
         this.locale = locale;
         this.theme = theme;
         this.query = query;
         this.who = who;
         this.places = List.copyOf(places);
+        this.rights = rights;
     }
 
     /** Whether somebody is signed in; without, no navigation is shown. */
@@ -43,6 +53,11 @@ public final class Shell {
     /** The places that the signed-in role may open. */
     public List<Place> getPlaces() {
         return places;
+    }
+
+    /** Whether the caller has a permission of module access, by its name such as {@code TRUE_STATES}. */
+    public boolean may(String permission) {
+        return rights.test(permission);
     }
 
     /** The saved brightness: {@code system}, {@code light} or {@code dark}. */

@@ -34,7 +34,8 @@ class ShellInterceptor implements HandlerInterceptor {
                 Themes.of(request, response),
                 query(request),
                 who == null ? null : who.getName(),
-                places(who, request.getContextPath()));
+                places(who, request.getContextPath()),
+                request::isUserInRole);
         request.setAttribute("shell", shell);
         return true;
     }

@@ -153,6 +153,38 @@ class FindingRows {
                 .list();
     }
 
+    /** The figures of some studies, whoever took part. */
+    List<AppraiserFigure> figuresOf(SiteId site, List<Long> studies) {
+        if (studies.isEmpty()) {
+            return List.of();
+        }
+        return jdbc.sql("""
+                select distinct on (f.study_id, f.appraiser_id)
+                       s.performed_on, s.task_id, s.set_id, f.*
+                  from appraiser_figure f
+                  join study s using (site_id, study_id)
+                 where f.site_id = :site and f.study_id in (:studies)
+                 order by f.study_id, f.appraiser_id, f.edition_no desc, f.engine_version desc""")
+                .param("site", site.value())
+                .param("studies", studies)
+                .query((row, number) -> new AppraiserFigure(row.getLong("appraiser_id"), toFigure(row, number)))
+                .list();
+    }
+
+    /** The newest study's figure of each appraiser who has one. */
+    List<AppraiserFigure> newestFigures(SiteId site) {
+        return jdbc.sql("""
+                select distinct on (f.appraiser_id)
+                       s.performed_on, s.task_id, s.set_id, f.*
+                  from appraiser_figure f
+                  join study s using (site_id, study_id)
+                 where f.site_id = :site
+                 order by f.appraiser_id, s.performed_on desc, f.study_id desc, f.edition_no desc, f.engine_version desc""")
+                .param("site", site.value())
+                .query((row, number) -> new AppraiserFigure(row.getLong("appraiser_id"), toFigure(row, number)))
+                .list();
+    }
+
     private static Figure toFigure(ResultSet row, int number) throws SQLException {
         return new Figure(
                 row.getLong("study_id"),

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
+import java.util.function.Consumer;
 import java.util.function.Function;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
@@ -81,6 +82,16 @@ public class Studies {
         return findings.figures(site, appraiserId, taskId);
     }
 
+    /** What these studies showed of each appraiser who took part; studies without findings are left out. */
+    public List<AppraiserFigure> figuresOf(SiteId site, List<StudyHead> page) {
+        return findings.figuresOf(site, page.stream().map(StudyHead::id).toList());
+    }
+
+    /** The newest study's figure of each appraiser who has one. */
+    public List<AppraiserFigure> newestFigures(SiteId site) {
+        return findings.newestFigures(site);
+    }
+
     /**
      * Concludes a study that was stored open.
      *
@@ -104,8 +115,8 @@ public class Studies {
         return calls.count(study);
     }
 
-    /** The pieces that the study names, with what its edition says of them, for computing. */
-    List<StudyPiece> pieces(StudyHead study) {
+    /** The pieces that the study names, with what its edition says of them; shown only to whose reading of the key was recorded. */
+    public List<StudyPiece> pieces(StudyHead study) {
         ReferenceSet set = sets.get(study.site(), study.setId());
         Map<Long, EditionPiece> edition = sets.piecesForScoring(set, study.edition()).stream()
                 .collect(Collectors.toMap(EditionPiece::id, Function.identity()));
@@ -117,6 +128,34 @@ public class Studies {
 
     private static StudyPiece piece(int number, EditionPiece piece) {
         return new StudyPiece(number, piece.id(), piece.label(), piece.trueState(), piece.defectKind());
+    }
+
+    /**
+     * Shows every stored call with its true state, those on grey pieces included: only for somebody whose reading of the
+     * answer key was recorded.
+     */
+    public void forEachCall(StudyHead study, Consumer<StoredCall> visitor) {
+        List<StudyPiece> pieces = pieces(study);
+        List<String> codes = codes(study);
+        List<String> seen = calls.seenKinds(study.site(), study.id());
+        calls.forEach(study, (piece, appraiser, trial, accepted, kind) -> {
+            StudyPiece judged = pieces.get(piece);
+            visitor.accept(new StoredCall(
+                    piece,
+                    judged.label(),
+                    judged.trueState(),
+                    judged.defectKind(),
+                    appraiser,
+                    codes.get(appraiser),
+                    trial,
+                    accepted,
+                    kind < 0 ? null : seen.get(kind)));
+        });
+    }
+
+    /** Whether any call of the study names a kind of defect. */
+    public boolean namesKinds(StudyHead study) {
+        return !calls.seenKinds(study.site(), study.id()).isEmpty();
     }
 
     /** The appraisers' codes in the order of the study. */

@@ -12,7 +12,7 @@ import org.levelgaze.sets.TrueState;
  * @param trueState what was decided
  * @param defectKind the kind of defect; null when good or not said
  */
-record StudyPiece(
+public record StudyPiece(
         int number,
         long pieceId,
         String label,
