@@ -1,5 +1,6 @@
 package org.levelgaze.journal;
 
+import io.swagger.v3.oas.annotations.Operation;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.springframework.web.bind.annotation.GetMapping;
@@ -34,11 +35,13 @@ class JournalApi {
         }
     }
 
+    @Operation(summary = "Entries in the order in which they were written")
     @GetMapping
     Page entries(Actor actor, @RequestParam(defaultValue = "0") long after) {
         return Page.of(journal.after(actor.site(), after, PAGE + 1));
     }
 
+    @Operation(summary = "Walk the chain and say whether it holds")
     @GetMapping("/verification")
     JournalVerification verification(Actor actor) {
         return journal.verify(actor.site());

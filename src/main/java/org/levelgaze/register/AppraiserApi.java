@@ -1,5 +1,7 @@
 package org.levelgaze.register;
 
+import io.swagger.v3.oas.annotations.Operation;
+import io.swagger.v3.oas.annotations.responses.ApiResponse;
 import jakarta.validation.Valid;
 import jakarta.validation.constraints.NotBlank;
 import jakarta.validation.constraints.NotNull;
@@ -65,6 +67,7 @@ class AppraiserApi {
         }
     }
 
+    @Operation(summary = "Enter a person or a camera", responses = @ApiResponse(responseCode = "201"))
     @PostMapping
     ResponseEntity<AppraiserAnswer> create(Actor actor, @Valid @RequestBody NewAppraiser appraiser) {
         AppraiserKind kind = Words.read("kind", appraiser.kind(), AppraiserKind::ofWord, "person, camera");
@@ -73,6 +76,7 @@ class AppraiserApi {
         return ResponseEntity.created(address(created.code())).body(AppraiserAnswer.of(created));
     }
 
+    @Operation(summary = "The appraisers, by code")
     @GetMapping
     Listing<AppraiserAnswer> list(
             Actor actor,
@@ -83,11 +87,13 @@ class AppraiserApi {
         return Listing.page(all, AppraiserAnswer::code, after, limit);
     }
 
+    @Operation(summary = "One appraiser")
     @GetMapping("/{code}")
     AppraiserAnswer read(Actor actor, @PathVariable String code) {
         return AppraiserAnswer.of(find(actor, code));
     }
 
+    @Operation(summary = "Say what a camera judges with, from when on", responses = @ApiResponse(responseCode = "201"))
     @PostMapping("/{code}/configurations")
     ResponseEntity<ConfigurationAnswer> addConfiguration(
             Actor actor, @PathVariable String code, @Valid @RequestBody NewConfiguration configuration) {
@@ -101,6 +107,7 @@ class AppraiserApi {
                 .orElseThrow();
     }
 
+    @Operation(summary = "What a camera has judged with")
     @GetMapping("/{code}/configurations")
     Listing<ConfigurationAnswer> configurations(Actor actor, @PathVariable String code) {
         return new Listing<>(AppraiserAnswer.of(find(actor, code)).configurations(), null);

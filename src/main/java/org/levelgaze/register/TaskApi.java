@@ -1,5 +1,7 @@
 package org.levelgaze.register;
 
+import io.swagger.v3.oas.annotations.Operation;
+import io.swagger.v3.oas.annotations.responses.ApiResponse;
 import jakarta.validation.Valid;
 import jakarta.validation.constraints.NotBlank;
 import java.net.URI;
@@ -71,6 +73,7 @@ class TaskApi {
         }
     }
 
+    @Operation(summary = "Enter a task with its defect kinds", responses = @ApiResponse(responseCode = "201"))
     @PostMapping
     ResponseEntity<TaskAnswer> create(Actor actor, @Valid @RequestBody NewTask task) {
         String name = task.name() == null ? task.code() : task.name();
@@ -78,6 +81,7 @@ class TaskApi {
         return ResponseEntity.created(address(created.code())).body(TaskAnswer.of(created));
     }
 
+    @Operation(summary = "The tasks, by code")
     @GetMapping
     Listing<TaskAnswer> list(
             Actor actor,
@@ -88,6 +92,7 @@ class TaskApi {
         return Listing.page(all, TaskAnswer::code, after, limit);
     }
 
+    @Operation(summary = "One task")
     @GetMapping("/{code}")
     TaskAnswer read(Actor actor, @PathVariable String code) {
         return tasks.byCode(actor.site(), code)

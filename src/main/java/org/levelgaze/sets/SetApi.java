@@ -1,5 +1,7 @@
 package org.levelgaze.sets;
 
+import io.swagger.v3.oas.annotations.Operation;
+import io.swagger.v3.oas.annotations.responses.ApiResponse;
 import jakarta.validation.Valid;
 import jakarta.validation.constraints.NotBlank;
 import jakarta.validation.constraints.NotNull;
@@ -115,6 +117,7 @@ class SetApi {
         }
     }
 
+    @Operation(summary = "Enter a reference set with its first edition", responses = @ApiResponse(responseCode = "201"))
     @PostMapping
     ResponseEntity<SetAnswer> create(Actor actor, @Valid @RequestBody NewSetBody body) {
         Task task = tasks.byCode(actor.site(), body.task())
@@ -123,6 +126,7 @@ class SetApi {
         return ResponseEntity.created(address(created.code())).body(answer(created));
     }
 
+    @Operation(summary = "The reference sets, by code")
     @GetMapping
     Listing<SetAnswer> list(
             Actor actor,
@@ -132,12 +136,14 @@ class SetApi {
         return new Listing<>(page.items().stream().map(this::answer).toList(), page.next());
     }
 
+    @Operation(summary = "One reference set with its editions, without true states")
     @GetMapping("/{code}")
     SetAnswer read(Actor actor, @PathVariable String code) {
         return answer(find(actor, code));
     }
 
     /** The answer key: scope {@code key:read}; the reading is recorded. */
+    @Operation(summary = "The answer key of the newest edition; the reading is recorded")
     @GetMapping("/{code}/pieces")
     Listing<PieceAnswer> pieces(Actor actor, @PathVariable String code) {
         ReferenceSet set = find(actor, code);

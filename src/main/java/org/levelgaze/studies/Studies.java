@@ -62,6 +62,11 @@ public class Studies {
         return rows.page(site, filter, offset, limit);
     }
 
+    /** The studies behind a mark in the list. */
+    List<StudyHead> after(SiteId site, StudyFilter filter, StudyCursor cursor, int limit) {
+        return rows.after(site, filter, cursor, limit);
+    }
+
     /** How many studies the filter lets through. */
     public int count(SiteId site, StudyFilter filter) {
         return rows.count(site, filter);

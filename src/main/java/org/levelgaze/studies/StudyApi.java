@@ -1,5 +1,7 @@
 package org.levelgaze.studies;
 
+import io.swagger.v3.oas.annotations.Operation;
+import io.swagger.v3.oas.annotations.responses.ApiResponse;
 import java.io.IOException;
 import java.io.InputStream;
 import java.net.URI;
@@ -78,6 +80,7 @@ class StudyApi {
             List<ParticipantAnswer> appraisers,
             List<String> notes) {}
 
+    @Operation(summary = "Bring a study as a file of calls", responses = @ApiResponse(responseCode = "201"))
     @PostMapping(consumes = {"text/csv", MediaType.TEXT_PLAIN_VALUE, MediaType.APPLICATION_OCTET_STREAM_VALUE})
     ResponseEntity<StudyAnswer> create(
             Actor actor,
@@ -98,6 +101,7 @@ class StudyApi {
                 .body(answer(studies.get(actor.site(), stored.id())));
     }
 
+    @Operation(summary = "The studies, the latest day first")
     @GetMapping
     Listing<StudyAnswer> list(
             Actor actor,
@@ -105,22 +109,25 @@ class StudyApi {
             @RequestParam(required = false) @Nullable String after,
             @RequestParam(defaultValue = "100") int limit) {
         Long taskId = task == null ? null : taskId(actor, task);
-        int from = after == null ? 0 : Integer.parseInt(after);
         int size = Math.max(1, Math.min(limit, Listing.LARGEST_PAGE));
         StudyFilter filter = new StudyFilter(taskId, null, null, null, null);
-        List<StudyAnswer> page = studies.page(actor.site(), filter, from, size + 1).stream()
-                .map(this::answer)
-                .toList();
-        boolean more = page.size() > size;
-        return new Listing<>(more ? page.subList(0, size) : page, more ? Integer.toString(from + size) : null);
+        List<StudyHead> found = after == null
+                ? studies.page(actor.site(), filter, 0, size + 1)
+                : studies.after(actor.site(), filter, StudyCursor.of(after), size + 1);
+        List<StudyHead> page = found.subList(0, Math.min(size, found.size()));
+        String next =
+                found.size() > size ? StudyCursor.after(page.get(size - 1)).text() : null;
+        return new Listing<>(page.stream().map(this::answer).toList(), next);
     }
 
+    @Operation(summary = "One study, without its calls")
     @GetMapping("/{id}")
     StudyAnswer read(Actor actor, @PathVariable long id) {
         return answer(studies.get(actor.site(), id));
     }
 
     /** The findings to the letter as they were stored. */
+    @Operation(summary = "What a study showed")
     @GetMapping(path = "/{id}/findings", produces = MediaType.APPLICATION_JSON_VALUE)
     String findings(Actor actor, @PathVariable long id) {
         return studies.findingsJson(studies.get(actor.site(), id))

@@ -196,6 +196,20 @@ class StudyRows {
                 .list();
     }
 
+    /** The studies that stand behind this mark in the list. */
+    List<StudyHead> after(SiteId site, StudyFilter filter, StudyCursor cursor, int limit) {
+        String below = " and (s.performed_on, s.study_id) < (:day, :id)";
+        return filtered(
+                        HEAD + FILTER + below + " order by s.performed_on desc, s.study_id desc limit :limit",
+                        site,
+                        filter)
+                .param("day", cursor.day())
+                .param("id", cursor.id())
+                .param("limit", limit)
+                .query(StudyRows::toHead)
+                .list();
+    }
+
     int count(SiteId site, StudyFilter filter) {
         return filtered("select count(*) from study s where s.site_id = :site " + FILTER, site, filter)
                 .query(Integer.class)

@@ -1,5 +1,6 @@
 package org.levelgaze.studies.pages;
 
+import io.swagger.v3.oas.annotations.Operation;
 import jakarta.servlet.http.HttpServletResponse;
 import java.io.IOException;
 import java.time.LocalDate;
@@ -80,6 +81,7 @@ class ReadingApi {
     record TrendAnswer(String appraiser, String task, List<PointAnswer> points) {}
 
     /** One point per concluded study, the earliest day first. */
+    @Operation(summary = "The figures of an appraiser, study by study")
     @GetMapping("/api/v1/appraisers/{code}/trend")
     TrendAnswer trend(Actor actor, @PathVariable String code, @RequestParam String task) {
         Appraiser appraiser = appraisers
@@ -94,6 +96,7 @@ class ReadingApi {
     }
 
     /** The calls with their true states: scope {@code key:read}; the reading is recorded. */
+    @Operation(summary = "The calls of a study; shows true states, the reading is recorded")
     @GetMapping(path = "/api/v1/studies/{id}/calls.csv", produces = "text/csv")
     void calls(Actor actor, @PathVariable long id, HttpServletResponse response) throws IOException {
         StudyHeading heading = ladders.heading(actor, id);
