@@ -67,6 +67,11 @@ record ArchitectureRules(String root) {
                 root + ".shared..");
     }
 
+    /** Sentences take findings and words; no framework, no clock. */
+    ArchRule sentencesArePure() {
+        return pure("studies.sentences", "java.time..", root + ".agreement..");
+    }
+
     private ArchRule pure(String module, String... more) {
         String[] itself = {root + "." + module + "..", "org.springframework.modulith"};
         return classes()

@@ -77,6 +77,7 @@ class ArchitectureTest {
                 rule("a pure engine", ArchitectureRules::agreementIsPure, "StringUtils", "words.Mutable"),
                 rule("pure pictures", ArchitectureRules::plotIsPure, "java.sql.Connection", "java.time.Clock"),
                 rule("pure reading", ArchitectureRules::readingIsPure, "stereotype.Component"),
+                rule("pure sentences", ArchitectureRules::sentencesArePure, "MessageSource"),
                 rule("entities of its modules' own", ArchitectureRules::entitiesAreNotPublic, "PublicEntity"),
                 rule("repositories of its modules' own", ArchitectureRules::repositoriesAreNotPublic, "PublicStore"),
                 rule("controllers for requests alone", ArchitectureRules::controllersAreNotPublic, "PublicController"),

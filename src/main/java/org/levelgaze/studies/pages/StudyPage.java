@@ -25,14 +25,12 @@ record StudyPage(StudyHeading heading, List<String> warnings, List<Appraised> ap
      * @param code for the link to the appraiser's page
      * @param words what the study says of him
      * @param lean the lean scale; null without a mistake, or with too many appraisers to draw
-     * @param plane the mistake plane; null with too many appraisers to draw
      */
     public record Appraised(
             String name,
             String code,
             InWords words,
-            @Nullable Picture lean,
-            @Nullable Picture plane) {}
+            @Nullable Picture lean) {}
 
     /** Keeps its own copies. */
     public StudyPage {

@@ -63,7 +63,7 @@ class StudyPages {
                 IntStream.range(0, names.size())
                         .mapToObj(number -> appraised(heading, number, found, words))
                         .toList(),
-                new StudySections(names, found, LIMITS, words).all());
+                new StudySections(names, found, planes(names, found, locale), LIMITS, words).all());
     }
 
     private static StudyFacts facts(StudyHeading heading, StudyShape shape) {
@@ -85,14 +85,23 @@ class StudyPages {
         AppraiserFindings found = findings.appraisers().get(number);
         boolean camera = taking.appraiser().kind() == AppraiserKind.CAMERA;
         Subject subject = new Subject(taking.name(), camera, taking.trials());
-        boolean drawn = number < StudyPage.MOST_DRAWN;
         Drawing drawing = languages.drawing("a" + number, words.locale());
         return new StudyPage.Appraised(
                 taking.name(),
                 taking.appraiser().code(),
                 AppraiserSentences.of(subject, found, findings.confidence(), LIMITS, words),
-                drawn ? lean(taking.name(), found, drawing) : null,
-                drawn ? plane(taking.name(), found, drawing.named("p" + number)) : null);
+                number < StudyPage.MOST_DRAWN ? lean(taking.name(), found, drawing) : null);
+    }
+
+    private List<Section.Drawn> planes(List<String> names, Findings findings, Locale locale) {
+        return IntStream.range(0, Math.min(StudyPage.MOST_DRAWN, names.size()))
+                .mapToObj(number -> new Section.Drawn(
+                        names.get(number),
+                        plane(
+                                names.get(number),
+                                findings.appraisers().get(number),
+                                languages.drawing("p" + number, locale))))
+                .toList();
     }
 
     /** Who made no mistake is never shown as leaning, whatever c is. */

@@ -17,6 +17,7 @@ final class StudySections {
 
     private final List<String> names;
     private final Findings findings;
+    private final List<Section.Drawn> planes;
     private final UsualLimits limits;
     private final Wording words;
     private final AgreementTables agreement;
@@ -25,10 +26,13 @@ final class StudySections {
      * The sections of one study.
      *
      * @param names the appraisers' names in the order of the findings
+     * @param planes their mistake planes, as many as are drawn
      */
-    StudySections(List<String> names, Findings findings, UsualLimits limits, Wording words) {
+    StudySections(
+            List<String> names, Findings findings, List<Section.Drawn> planes, UsualLimits limits, Wording words) {
         this.names = names;
         this.findings = findings;
+        this.planes = planes;
         this.limits = limits;
         this.words = words;
         this.agreement = new AgreementTables(names, findings, words);
@@ -204,7 +208,8 @@ final class StudySections {
                         words.say("studies.term." + term), words.say("studies.term." + term + ".means")))
                 .toList();
         String note = words.say("studies.ask." + name + ".note");
-        return new Section(words.say("studies.ask." + name), List.of(note), tables, meanings);
+        List<Section.Drawn> pictures = "mistakes".equals(name) ? planes : List.of();
+        return new Section(words.say("studies.ask." + name), List.of(note), tables, pictures, meanings);
     }
 
     private Table shareTable(List<List<String>> rows) {

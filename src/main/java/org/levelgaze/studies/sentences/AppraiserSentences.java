@@ -8,6 +8,7 @@ import org.levelgaze.agreement.AppraiserFindings;
 import org.levelgaze.agreement.BiasRatio;
 import org.levelgaze.agreement.CohenKappa;
 import org.levelgaze.agreement.Interval;
+import org.levelgaze.agreement.Lean;
 import org.levelgaze.agreement.SelfConsistency;
 import org.levelgaze.agreement.Share;
 
@@ -52,6 +53,7 @@ public final class AppraiserSentences {
                 held,
                 sentences.effective(check),
                 sentences.lean(),
+                sentences.ratio(),
                 sentences.sure(),
                 sentences.next(check),
                 sentences.kappa());
@@ -102,22 +104,27 @@ public final class AppraiserSentences {
         }
         String key =
                 "studies.says.lean." + found.signalDetection().lean().name().toLowerCase(Locale.ROOT);
-        String shares = words.say(key, who.name(), words.percent(accepts), words.percent(rejects));
-        return shares + " " + ratio();
+        return words.say(key, who.name(), words.percent(accepts), words.percent(rejects));
     }
 
     private String ratio() {
         BiasRatio ratio = found.biasRatio();
         Interval interval = ratio.interval();
+        if (interval == null) {
+            return "";
+        }
         String range = words.range(interval);
-        if (interval == null || interval.contains(1)) {
+        if (interval.contains(1)) {
             return ratio.ofRates() == null
                     ? words.say("studies.says.ratio.even.infinite", range)
                     : words.say("studies.says.ratio.even", words.number(ratio.ofRates()), range);
         }
-        return ratio.ofRates() == null
+        String apart = ratio.ofRates() == null
                 ? words.say("studies.says.ratio.apart.infinite", range)
                 : words.say("studies.says.ratio.apart", words.number(ratio.ofRates()), range);
+        return found.signalDetection().lean() == Lean.EVEN
+                ? apart + " " + words.say("studies.says.ratio.apart.open")
+                : apart;
     }
 
     private String sure() {

@@ -1,5 +1,6 @@
 package org.levelgaze.studies.sentences;
 
+import java.math.RoundingMode;
 import java.text.NumberFormat;
 import java.time.LocalDate;
 import java.time.format.DateTimeFormatter;
@@ -118,6 +119,7 @@ public record Wording(Locale locale, Phrases phrases) {
         NumberFormat format = NumberFormat.getNumberInstance(locale);
         format.setMinimumFractionDigits(least);
         format.setMaximumFractionDigits(most);
+        format.setRoundingMode(RoundingMode.HALF_UP);
         String written = format.format(value);
         boolean zero = written.chars().noneMatch(c -> Character.isDigit(c) && Character.digit(c, 10) > 0);
         return zero ? format.format(0.0) : written.replace('-', '\u2212');

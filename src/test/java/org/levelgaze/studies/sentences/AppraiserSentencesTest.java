@@ -48,8 +48,8 @@ class AppraiserSentencesTest {
     void asksToRefreshTheStandardWhereTheBiasRatioIsBelowOneThoughItMayBeChance() {
         InWords said = new Tried(10, 10, 1, 2, 1).inWords();
 
-        assertThat(plain(said.lean()))
-                .startsWith("The mistakes of Ana go both ways, as far as this shows: 20 % of the calls on defective"
+        assertThat(plain(said.lean() + " " + said.ratio()))
+                .startsWith("Which way the mistakes of Ana go stays open: 20 % of the calls on defective"
                         + " pieces and 10 % on good pieces were wrong. The bias ratio of 0.50 (")
                 .endsWith("is not distinguishable from even.");
         assertThat(said.next().get(0)).startsWith("Refresh the standard with Ana: a bias ratio of 0.50 is below 1");
@@ -61,6 +61,7 @@ class AppraiserSentencesTest {
         InWords said = new Tried(10, 170, 1, 0, 0).inWords();
 
         assertThat(said.lean()).isEqualTo("Ana made no mistake, so nothing shows a lean.");
+        assertThat(said.ratio()).isEmpty();
     }
 
     @Test
@@ -69,7 +70,19 @@ class AppraiserSentencesTest {
                 .startsWith("Ana leans lenient and lets defects out: 40");
         assertThat(new Tried(40, 40, 1, 1, 16).inWords().lean())
                 .startsWith("Ana leans strict and keeps good ones back: 2");
-        assertThat(new Tried(40, 40, 1, 4, 3).inWords().lean()).startsWith("The mistakes of Ana go both ways");
+        assertThat(new Tried(40, 40, 1, 4, 3).inWords().lean())
+                .startsWith("Which way the mistakes of Ana go stays open");
+    }
+
+    /** 0 of 30 against 4 of 30: the ratio is 1.11 or more at 95 %, while the interval of c holds 0. */
+    @Test
+    void saysWhereTheBiasRatioDiffersFromEvenAndTheScaleDoesNotBearItOut() {
+        InWords said = new Tried(15, 15, 2, 0, 4).inWords();
+
+        assertThat(plain(said.lean() + " " + said.ratio()))
+                .isEqualTo("Which way the mistakes of Ana go stays open: 0 % of the calls on defective pieces and 13 %"
+                        + " on good pieces were wrong. No defective piece was let through, and the bias ratio (1.11 or"
+                        + " more) differs from even. The scale c does not bear that out: its interval holds 0.");
     }
 
     @Test
@@ -123,7 +136,7 @@ class AppraiserSentencesTest {
                 .isEqualTo("Eine Studie mit 20 Teilen, davon 90 % richtig, lässt 68 % bis 99 % offen (exaktes"
                         + " Intervall, 95 %). Die übliche Grenze von 80 % liegt darin, also entscheidet diese Studie"
                         + " allein sie nicht.");
-        assertThat(said.lean()).contains("Verzerrungsverhältnis von 1,00");
+        assertThat(said.ratio()).contains("Verzerrungsverhältnis von 1,00");
     }
 
     private static String plain(String sentence) {
