@@ -62,6 +62,19 @@ class StudyPagesTest {
     }
 
     @Test
+    void theSummaryNeedsNoWordThatItsReaderHasNeverSeen() {
+        StudyHead study = plant().study("SUM", Plant.DAY, true, Plant.published());
+
+        assertThat(visit(Role.PROCTOR).read("/studies/" + study.id() + "/summary"))
+                .contains("What was asked?", "What was found?", "What does that allow?")
+                .contains("Each of 50 pieces of the reference set G-SUM has a known true state")
+                .contains("By the usual limits not everybody here may be relied on for this task.")
+                .contains("It does not prove that nothing gets out.", "Requirements of a customer")
+                .doesNotContainIgnoringCase("kappa")
+                .doesNotContainIgnoringCase("bias ratio");
+    }
+
+    @Test
     void anOpenStudyHasNoFindingsUntilSomebodyConcludesIt() {
         StudyHead study = plant().study("OPEN", Plant.DAY, false, TWO_PIECES.formatted("OPEN-ANA"));
         String address = "/studies/" + study.id();

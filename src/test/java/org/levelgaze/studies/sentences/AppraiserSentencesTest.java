@@ -69,7 +69,7 @@ class AppraiserSentencesTest {
         assertThat(new Tried(40, 40, 1, 16, 1).inWords().lean())
                 .startsWith("Ana leans lenient and lets defects out: 40");
         assertThat(new Tried(40, 40, 1, 1, 16).inWords().lean())
-                .startsWith("Ana leans strict and keeps good ones back: 2");
+                .startsWith("Ana leans strict and keeps good ones back: 3");
         assertThat(new Tried(40, 40, 1, 4, 3).inWords().lean())
                 .startsWith("Which way the mistakes of Ana go stays open");
     }
