@@ -1,10 +1,13 @@
 package org.levelgaze.studies.pages;
 
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.register.Appraiser;
 import org.levelgaze.register.Appraisers;
 import org.levelgaze.register.CameraConfiguration;
+import org.levelgaze.register.Task;
 import org.levelgaze.register.Tasks;
 import org.levelgaze.sets.Edition;
 import org.levelgaze.sets.ReferenceSet;
@@ -27,15 +30,25 @@ class Headings {
     }
 
     StudyHeading of(StudyHead study) {
-        ReferenceSet set = sets.get(study.site(), study.setId());
+        return of(List.of(study)).get(0);
+    }
+
+    /** The headings of studies of one site; what several of them share is read once. */
+    List<StudyHeading> of(List<StudyHead> studies) {
+        Shared shared = new Shared();
+        return studies.stream().map(study -> heading(study, shared)).toList();
+    }
+
+    private static StudyHeading heading(StudyHead study, Shared shared) {
         List<Appraiser> taking = study.appraisers().stream()
-                .map(one -> appraisers.get(study.site(), one.appraiserId()))
+                .map(one -> shared.appraiser(study, one))
                 .toList();
+        ReferenceSet set = shared.set(study);
         return new StudyHeading(
                 study,
-                tasks.get(study.site(), study.taskId()),
+                shared.task(study),
                 set,
-                edition(set, study.edition()),
+                shared.edition(set, study.edition()),
                 study.appraisers().stream()
                         .map(one -> taking(one, taking.get(one.number()), taking))
                         .toList());
@@ -57,10 +70,31 @@ class Headings {
                 .orElse(null);
     }
 
-    private Edition edition(ReferenceSet set, int number) {
-        return sets.editions(set).stream()
-                .filter(edition -> edition.number() == number)
-                .findFirst()
-                .orElseThrow();
+    /** What has been read for one list of studies. */
+    private final class Shared {
+
+        private final Map<Long, Task> knownTasks = new HashMap<>();
+        private final Map<Long, ReferenceSet> knownSets = new HashMap<>();
+        private final Map<Long, List<Edition>> knownEditions = new HashMap<>();
+        private final Map<Long, Appraiser> knownAppraisers = new HashMap<>();
+
+        Task task(StudyHead study) {
+            return knownTasks.computeIfAbsent(study.taskId(), id -> tasks.get(study.site(), id));
+        }
+
+        ReferenceSet set(StudyHead study) {
+            return knownSets.computeIfAbsent(study.setId(), id -> sets.get(study.site(), id));
+        }
+
+        Appraiser appraiser(StudyHead study, StudyHead.Participant one) {
+            return knownAppraisers.computeIfAbsent(one.appraiserId(), id -> appraisers.get(study.site(), id));
+        }
+
+        Edition edition(ReferenceSet set, int number) {
+            return knownEditions.computeIfAbsent(set.id(), id -> sets.editions(set)).stream()
+                    .filter(edition -> edition.number() == number)
+                    .findFirst()
+                    .orElseThrow();
+        }
     }
 }

@@ -82,8 +82,8 @@ class StudyLists {
     private List<StudyList.Line> lines(SiteId site, List<StudyHead> shown, Locale locale) {
         List<AppraiserFigure> figures = studies.figuresOf(site, shown);
         List<StudyList.Line> lines = new ArrayList<>();
-        for (StudyHead study : shown) {
-            StudyHeading heading = headings.of(study);
+        for (StudyHeading heading : headings.of(shown)) {
+            StudyHead study = heading.study();
             List<StudyList.Lean> leans = new ArrayList<>();
             for (StudyHeading.Taking one : heading.taking()) {
                 figure(figures, study, one).ifPresent(figure -> leans.add(lean(study, one, figure, locale)));

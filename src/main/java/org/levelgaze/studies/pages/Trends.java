@@ -1,10 +1,11 @@
 package org.levelgaze.studies.pages;
 
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import java.util.TreeMap;
 import java.util.function.Function;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.agreement.BiasRatio;
@@ -46,20 +47,11 @@ class Trends {
 
     /** One trend for each task with a concluded study, in the order of the tasks' codes. */
     List<AppraiserPage.TaskTrend> of(Appraiser appraiser, Locale locale) {
-        Map<String, List<Figure>> byTask = new TreeMap<>();
-        for (Figure figure : studies.figures(appraiser.site(), appraiser.id(), null)) {
-            String code = tasks.get(appraiser.site(), figure.taskId()).code();
-            byTask.merge(
-                    code,
-                    List.of(figure),
-                    (some, more) -> Stream.concat(some.stream(), more.stream()).toList());
-        }
+        Map<Long, List<Figure>> byTask = studies.figures(appraiser.site(), appraiser.id(), null).stream()
+                .collect(Collectors.groupingBy(Figure::taskId));
         return byTask.entrySet().stream()
-                .map(each -> trend(
-                        appraiser,
-                        tasks.byCode(appraiser.site(), each.getKey()).orElseThrow(),
-                        each.getValue(),
-                        locale))
+                .map(each -> trend(appraiser, tasks.get(appraiser.site(), each.getKey()), each.getValue(), locale))
+                .sorted(Comparator.comparing(each -> each.task().code()))
                 .toList();
     }
 
