@@ -69,7 +69,7 @@ public final class ImportAgainstCopy {
         int rounds = arguments.length > 1 ? Integer.parseInt(arguments[1]) : 5;
         Path home = Files.createTempDirectory("levelgaze-bench");
         try (ConfigurableApplicationContext program = new SpringApplicationBuilder(Levelgaze.class)
-                .properties(Map.of("LEVELGAZE_HOME", home.resolve("home").toString(), "server.port", "0"))
+                .properties(Map.of("levelgaze.home", home.resolve("home").toString(), "server.port", "0"))
                 .run()) {
             program.getBean(Tasks.class).create(ACTOR, "RIM", "Rim of the bowl", List.of());
             new ImportAgainstCopy(program, calls).run(rounds);
