@@ -20,7 +20,8 @@ import org.springframework.transaction.annotation.Transactional;
 public class ReferenceSets {
 
     private static final int LONGEST_CODE = 100;
-    private static final Pattern CONTROL = Pattern.compile("\\p{Cntrl}");
+    /** Control characters, and what would mean something else in an address. */
+    private static final Pattern NOT_USABLE = Pattern.compile("\\p{Cntrl}|;|^\\.{1,2}$");
 
     private final SetRows rows;
     private final Journal journal;
@@ -96,10 +97,7 @@ public class ReferenceSets {
      */
     @Transactional
     public List<EditionPiece> readKey(Actor actor, ReferenceSet set, int edition, String page) {
-        if (rows.recordKeyReading(set, edition, actor.who(), page, clock.instant())) {
-            String subject = "set:" + set.id() + "/" + edition;
-            journal.record(actor, Act.of("answer-key.read", subject, page));
-        }
+        noteKeySeen(actor, set, edition, page);
         return rows.pieces(set, edition);
     }
 
@@ -107,6 +105,20 @@ public class ReferenceSets {
     public boolean hasReadKey(Actor actor, ReferenceSet set, int edition) {
         return keyReadings(set, edition).stream()
                 .anyMatch(reading -> reading.who().equals(actor.who()));
+    }
+
+    /**
+     * Records that somebody has seen the answer key, as with a file that holds it. Only the first time counts and is
+     * journalled.
+     *
+     * @param where on which page or in what
+     */
+    @Transactional
+    public void noteKeySeen(Actor actor, ReferenceSet set, int edition, String where) {
+        if (rows.recordKeyReading(set, edition, actor.who(), where, clock.instant())) {
+            String subject = "set:" + set.id() + "/" + edition;
+            journal.record(actor, Act.of("answer-key.read", subject, where));
+        }
     }
 
     /** Who has seen the answer key of an edition, in the order of the first reading. */
@@ -117,7 +129,7 @@ public class ReferenceSets {
     private void checkCode(SiteId site, String code) {
         if (code.isBlank()
                 || code.length() > LONGEST_CODE
-                || CONTROL.matcher(code).find()) {
+                || NOT_USABLE.matcher(code).find()) {
             throw new Refusal(Refusal.Kind.INVALID, "set-code-not-usable", code, LONGEST_CODE);
         }
         if (rows.setByCode(site, code).isPresent()) {

@@ -79,6 +79,9 @@ class StudyWriter {
                 pieces.stream().mapToLong(StudyPiece::pieceId).toArray());
         rows.insertSeenKinds(head.site(), head.id(), calls.kinds());
         copy(head, calls, watcher);
+        if (calls.hasTruths()) {
+            sets.noteKeySeen(actor, set, edition.number(), "a file of calls with true states");
+        }
         journal.record(actor, Act.of("study.imported", "study:" + head.id(), calls.sha256() + " " + head));
         if (request.conclude()) {
             conclusions.conclude(actor, head, forEngine(calls, pieces, taking));

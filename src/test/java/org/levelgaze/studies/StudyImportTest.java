@@ -32,8 +32,10 @@ import org.levelgaze.register.Task;
 import org.levelgaze.register.Tasks;
 import org.levelgaze.sets.Basis;
 import org.levelgaze.sets.Edition;
+import org.levelgaze.sets.KeyReading;
 import org.levelgaze.sets.NewPiece;
 import org.levelgaze.sets.NewSet;
+import org.levelgaze.sets.ReferenceSet;
 import org.levelgaze.sets.ReferenceSets;
 import org.levelgaze.sets.TrueState;
 import org.levelgaze.shared.Refusal;
@@ -339,6 +341,20 @@ class StudyImportTest {
         assertThat(studies.findings(study)).isPresent();
         assertRefused(
                 "study-concluded-already", () -> studies.conclude(ENGINEER, studies.get(SiteId.MAIN, study.id())));
+    }
+
+    @Test
+    void countsWhoBringsAFileWithTrueStatesAsHavingSeenTheKey() {
+        knownSet();
+        take(Consent.EVERYTHING_NEW, "piece,appraiser,trial,call\nG,%s,1,accept\n".formatted(ana));
+        ReferenceSet known = sets.byCode(SiteId.MAIN, set).orElseThrow();
+        assertThat(sets.keyReadings(known, 1))
+                .as("a file without true states shows none")
+                .isEmpty();
+
+        take(Consent.EVERYTHING_NEW, "piece,reference,appraiser,trial,call\nG,good,%s,1,accept\n".formatted(ana));
+
+        assertThat(sets.keyReadings(known, 1)).extracting(KeyReading::who).containsExactly("account:7");
     }
 
     @Test
