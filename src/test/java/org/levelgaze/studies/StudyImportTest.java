@@ -210,6 +210,17 @@ class StudyImportTest {
     }
 
     @Test
+    void makesAGreyPieceOfASetFromAFileThatSaysSo() {
+        StudyHead study = take(
+                Consent.EVERYTHING_NEW,
+                "piece,reference,appraiser,trial,call\n1,grey,%1$s,1,accept\n2,good,%1$s,1,accept\n".formatted(ana));
+
+        assertThat(sets.newest(sets.byCode(SiteId.MAIN, set).orElseThrow()).grey())
+                .isEqualTo(1);
+        assertThat(studies.findings(study).orElseThrow().study().pieces()).isEqualTo(1);
+    }
+
+    @Test
     void namesEveryPieceThatDoesNotFitTheSet() {
         knownSet();
         String file =

@@ -99,7 +99,9 @@ final class Answers {
         Map<String, WordChoice> words = new LinkedHashMap<>();
         for (int at = 0; at < header.size(); at++) {
             if (choices.get(at).is(role)) {
-                header.get(at).words().forEach(word -> ask(word, words, meanings));
+                header.get(at).words().stream()
+                        .filter(word -> role != ColumnRole.REFERENCE || !Words.isGrey(word))
+                        .forEach(word -> ask(word, words, meanings));
             }
         }
         further.forEach(word -> ask(word, words, meanings));

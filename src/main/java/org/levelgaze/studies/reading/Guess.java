@@ -39,7 +39,9 @@ public record Guess(@Nullable Layout layout, Words words, List<String> openCalls
                     column.words().forEach(word -> calls.add(Words.plain(word)));
                 }
                 if (column.name().equals(layout.reference())) {
-                    column.words().forEach(word -> truths.add(Words.plain(word)));
+                    column.words().stream()
+                            .filter(word -> !Words.isGrey(word))
+                            .forEach(word -> truths.add(Words.plain(word)));
                 }
             }
         }

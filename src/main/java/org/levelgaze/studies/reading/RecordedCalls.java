@@ -80,7 +80,7 @@ public final class RecordedCalls {
 
     /** Whether the file says what its pieces really are. It then does for all of them. */
     public boolean hasTruths() {
-        return !pieces.isEmpty() && pieces.get(0).truth() != null;
+        return !pieces.isEmpty() && pieces.get(0).truthSaid();
     }
 
     /** Shows every call to the visitor, in the order of the file. */

@@ -17,6 +17,8 @@ final class Recorder {
 
         final int row;
 
+        boolean truthSaid;
+
         @Nullable
         TrueState truth;
 
@@ -84,9 +86,11 @@ final class Recorder {
         return names.size() - 1;
     }
 
-    void truth(int place, TrueState truth, String text, int row, Column column) {
+    /** What a row says of a piece's true state; {@code null}: that it is undecided. */
+    void truth(int place, @Nullable TrueState truth, String text, int row, Column column) {
         KnownPiece piece = pieces.get(place);
-        if (piece.truth == null) {
+        if (!piece.truthSaid) {
+            piece.truthSaid = true;
             piece.truth = truth;
             piece.truthText = text;
             piece.truthRow = row;
@@ -158,14 +162,14 @@ final class Recorder {
                 ? columns.calls().get(0).call().name()
                 : columns.trial().name();
         trials.nameGaps(trial, bad);
-        if (columns.reference() == null || pieces.stream().allMatch(piece -> piece.truth == null)) {
+        if (columns.reference() == null || pieces.stream().noneMatch(piece -> piece.truthSaid)) {
             return;
         }
         String reference = columns.reference().name();
         int place = 0;
         for (String label : labels.keySet()) {
             KnownPiece piece = pieces.get(place++);
-            if (piece.truth == null && !piece.truthUnclear) {
+            if (!piece.truthSaid && !piece.truthUnclear) {
                 bad.add(piece.row, reference, "", "no-truth", reference, label);
             }
         }
@@ -176,7 +180,7 @@ final class Recorder {
         int place = 0;
         for (String label : labels.keySet()) {
             KnownPiece piece = pieces.get(place++);
-            recorded.add(new RecordedPiece(label, piece.truth, piece.defect, piece.row));
+            recorded.add(new RecordedPiece(label, piece.truth, piece.truthSaid, piece.defect, piece.row));
         }
         return new RecordedCalls(recorded, List.copyOf(appraisers.keySet()), kindNames, calls, facts);
     }

@@ -77,6 +77,10 @@ final class RowReader {
             return;
         }
         String text = cells.get(column.at());
+        if (Words.isGrey(text)) {
+            recorder.truth(piece, null, text, row, column);
+            return;
+        }
         TrueState truth = word(text, row, column, truths, words.good(), words.defective());
         if (truth == null) {
             recorder.truthUnclear(piece);

@@ -15,6 +15,8 @@ import java.util.Set;
  */
 public record Words(Set<String> accept, Set<String> reject, Set<String> good, Set<String> defective) {
 
+    private static final String GREY = "grey";
+
     private static final Words STANDARD =
             new Words(Set.of("accept"), Set.of("reject"), ordered("good", "accept"), ordered("defective", "reject"));
 
@@ -50,6 +52,11 @@ public record Words(Set<String> accept, Set<String> reject, Set<String> good, Se
         Set<String> all = new LinkedHashSet<>(own);
         known.stream().filter(word -> !others.contains(word)).sorted().forEach(all::add);
         return all;
+    }
+
+    /** Whether a word of the reference says that the piece is undecided. It is the same in every file and never asked. */
+    public static boolean isGrey(String word) {
+        return plain(word).equals(GREY);
     }
 
     /** The form in which words are compared. */

@@ -156,6 +156,18 @@ class CallReaderTest {
     }
 
     @Test
+    void aGreyPieceIsTakenAndNotScored() {
+        RecordedCalls calls = calls(HEADER + "1,grey,Ana,1,accept\n2,good,Ana,1,reject\n1,Grey,Ana,2,reject\n");
+
+        assertThat(calls.hasTruths()).isTrue();
+        assertThat(calls.pieces()).extracting(RecordedPiece::isGrey).containsExactly(true, false);
+        assertThat(calls.calls()).isEqualTo(3);
+        assertThat(calls.toStudy().pieces()).extracting(Piece::label).containsExactly("2");
+        assertThat(complaints(HEADER + "1,grey,Ana,1,accept\n1,good,Ana,2,accept\n"))
+                .containsExactly("Row 3: reference of piece '1' is 'good' here and 'grey' in row 2.");
+    }
+
+    @Test
     void theReferenceMayBeLeftOut() {
         RecordedCalls without = calls("piece,appraiser,trial,call\n1,Ana,1,accept\n2,Ana,1,reject\n3,Ana,1,reject\n");
 
