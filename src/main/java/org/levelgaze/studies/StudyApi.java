@@ -1,6 +1,9 @@
 package org.levelgaze.studies;
 
 import io.swagger.v3.oas.annotations.Operation;
+import io.swagger.v3.oas.annotations.Parameter;
+import io.swagger.v3.oas.annotations.media.Content;
+import io.swagger.v3.oas.annotations.media.Schema;
 import io.swagger.v3.oas.annotations.responses.ApiResponse;
 import java.io.IOException;
 import java.io.InputStream;
@@ -80,7 +83,13 @@ class StudyApi {
             List<ParticipantAnswer> appraisers,
             List<String> notes) {}
 
-    @Operation(summary = "Bring a study as a file of calls", responses = @ApiResponse(responseCode = "201"))
+    @Operation(
+            summary = "Bring a study as a file of calls",
+            requestBody =
+                    @io.swagger.v3.oas.annotations.parameters.RequestBody(
+                            required = true,
+                            content = @Content(mediaType = "text/csv", schema = @Schema(type = "string"))),
+            responses = @ApiResponse(responseCode = "201"))
     @PostMapping(consumes = {"text/csv", MediaType.TEXT_PLAIN_VALUE, MediaType.APPLICATION_OCTET_STREAM_VALUE})
     ResponseEntity<StudyAnswer> create(
             Actor actor,
@@ -90,7 +99,8 @@ class StudyApi {
             @RequestParam(required = false) @Nullable String configuration,
             @RequestParam(defaultValue = "true") boolean conclude,
             @RequestParam(defaultValue = "false") boolean create,
-            @RequestHeader(name = HttpHeaders.CONTENT_LENGTH, defaultValue = "-1") long length,
+            @Parameter(hidden = true) @RequestHeader(name = HttpHeaders.CONTENT_LENGTH, defaultValue = "-1")
+                    long length,
             InputStream body)
             throws IOException {
         RecordedCalls calls = read(largest.within(body, length));

@@ -103,7 +103,9 @@ class TasksAndSetsTest {
 
         assertThat(visit(Role.QUALITY_ENGINEER).read("/"))
                 .contains("The set S-SOON (Rim) is in date until", "Plan its recalibration.")
-                .contains("The set S-PAST (Rim) was in date until", "Studies on it get no verdict.")
+                .contains(
+                        "The set S-PAST (Rim) was in date until",
+                        "Try nobody on it before its true states are confirmed.")
                 .doesNotContain("S-FRESH");
     }
 

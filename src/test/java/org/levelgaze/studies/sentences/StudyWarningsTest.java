@@ -37,7 +37,7 @@ class StudyWarningsTest {
         assertThat(warnings(25, 25, 2, 0, true, DAY.minusDays(1)))
                 .containsExactly(
                         "The set G-04 was not in date on 12 Mar 2027: its true states hold from 15 Jan 2027 to 11 Mar"
-                                + " 2027. Criteria would give no verdict on this study.",
+                                + " 2027. This study proves nothing about an appraiser.",
                         "The true states of G-04 came with a file of calls. Nobody has adjudicated them, so a"
                                 + " \"mistake\" may be a mistake of the file.",
                         "50 % of these pieces are defective. On the line there are fewer, and people miss more where"
