@@ -219,7 +219,9 @@ class ImportPagesTest {
 
         MvcTestResult refused = follow(order(upload, newTaskAndSet()));
 
-        assertThat(refused).bodyText().contains("Row", "1 rows cannot be taken", "<code>meh</code> <span>means</span>");
+        assertThat(refused)
+                .bodyText()
+                .contains("Row", "One row cannot be taken", "<code>meh</code> <span>means</span>");
     }
 
     @Test
