@@ -1,7 +1,11 @@
 package org.levelgaze.sets;
 
+import java.nio.charset.StandardCharsets;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
 import java.time.LocalDate;
 import java.util.HashSet;
+import java.util.HexFormat;
 import java.util.List;
 import java.util.Set;
 import org.jspecify.annotations.Nullable;
@@ -47,6 +51,25 @@ public record NewSet(
                     code,
                     decidedOn.toString(),
                     validUntil.toString());
+        }
+    }
+
+    /** What the journal's digest is taken over: everything, the pieces by a digest of theirs, since there may be a million. */
+    String summary() {
+        MessageDigest digest = sha256();
+        for (NewPiece piece : pieces) {
+            digest.update(piece.toString().getBytes(StandardCharsets.UTF_8));
+        }
+        return "NewSet[code=" + code + ", decidedOn=" + decidedOn + ", decidedBy=" + decidedBy + ", validUntil="
+                + validUntil + ", basis=" + basis + ", pieces=" + pieces.size() + ":"
+                + HexFormat.of().formatHex(digest.digest()) + "]";
+    }
+
+    private static MessageDigest sha256() {
+        try {
+            return MessageDigest.getInstance("SHA-256");
+        } catch (NoSuchAlgorithmException e) {
+            throw new IllegalStateException("Every Java platform has SHA-256", e);
         }
     }
 

@@ -48,7 +48,7 @@ public class ReferenceSets {
         checkKinds(task, set);
         ReferenceSet created = rows.insertSet(actor.site(), task.id(), set.code(), set.basis(), clock.instant());
         rows.insertFirstEdition(created, set, actor.who(), clock.instant());
-        journal.record(actor, Act.of("set.created", "set:" + created.id(), set.toString()));
+        journal.record(actor, Act.of("set.created", "set:" + created.id(), set.summary()));
         return created;
     }
 

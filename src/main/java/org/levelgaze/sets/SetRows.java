@@ -6,9 +6,10 @@ import java.sql.SQLException;
 import java.sql.Timestamp;
 import java.time.Instant;
 import java.time.LocalDate;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Function;
+import org.jspecify.annotations.Nullable;
 import org.levelgaze.shared.SiteId;
 import org.springframework.jdbc.core.JdbcTemplate;
 import org.springframework.jdbc.core.simple.JdbcClient;
@@ -19,7 +20,7 @@ import org.springframework.stereotype.Repository;
 class SetRows {
 
     private static final String SET = "select site_id, set_id, code, task_id from reference_set where site_id = :site ";
-    private static final int BATCH = 1000;
+    private static final int BATCH = 10_000;
 
     private final JdbcClient jdbc;
     private final JdbcTemplate template;
@@ -47,7 +48,6 @@ class SetRows {
     }
 
     void insertFirstEdition(ReferenceSet set, NewSet content, String who, Instant at) {
-        List<Long> ids = insertPieces(set, content.pieces());
         jdbc.sql("""
                 insert into edition (site_id, set_id, edition_no, decided_on, decided_by, valid_until, basis,
                                      recorded_at, recorded_by)
@@ -61,51 +61,47 @@ class SetRows {
                 .param("at", Timestamp.from(at))
                 .param("who", who)
                 .update();
-        insertMembership(set, 1, content.pieces(), ids);
+        for (int from = 0; from < content.pieces().size(); from += BATCH) {
+            int to = Math.min(content.pieces().size(), from + BATCH);
+            insertPieces(set, from, content.pieces().subList(from, to));
+        }
     }
 
-    private List<Long> insertPieces(ReferenceSet set, List<NewPiece> pieces) {
-        List<Long> ids = jdbc.sql("select nextval('piece_seq') from generate_series(1, :n)")
+    /** Some thousands of pieces in one statement each, since a camera may be tried on a great many. */
+    private void insertPieces(ReferenceSet set, int position, List<NewPiece> pieces) {
+        long[] ids = jdbc
+                .sql("select nextval('piece_seq') from generate_series(1, :n)")
                 .param("n", pieces.size())
                 .query(Long.class)
-                .list();
-        List<Object[]> values = new ArrayList<>();
-        for (int i = 0; i < pieces.size(); i++) {
-            values.add(new Object[] {
-                set.site().value(), set.id(), ids.get(i), pieces.get(i).label()
-            });
-        }
-        inBatches("insert into piece (site_id, set_id, piece_id, label) values (?, ?, ?, ?)", values);
-        return ids;
-    }
-
-    private void insertMembership(ReferenceSet set, int edition, List<NewPiece> pieces, List<Long> ids) {
-        List<Object[]> values = new ArrayList<>();
-        for (int i = 0; i < pieces.size(); i++) {
-            NewPiece piece = pieces.get(i);
-            Zone zone = piece.zone();
-            values.add(new Object[] {
-                set.site().value(),
-                set.id(),
-                edition,
-                i,
-                ids.get(i),
-                set.taskId(),
-                piece.trueState().word(),
-                piece.defectKind(),
-                zone == null ? null : zone.words()
-            });
-        }
-        inBatches("""
+                .stream()
+                .mapToLong(Long::longValue)
+                .toArray();
+        template.update("""
+                insert into piece (site_id, set_id, piece_id, label)
+                select ?, ?, id, label from unnest(?, ?) as brought (id, label)""", set.site().value(), set.id(), ids, texts(pieces, NewPiece::label));
+        template.update(
+                """
                 insert into edition_piece (site_id, set_id, edition_no, position, piece_id, task_id, true_state,
                                            defect_kind, zone)
-                values (?, ?, ?, ?, ?, ?, ?, ?, ?)""", values);
+                select ?, ?, 1, ? + place - 1, id, ?, true_state, defect_kind, zone
+                  from unnest(?, ?, ?, ?) with ordinality as brought (id, true_state, defect_kind, zone, place)""",
+                set.site().value(),
+                set.id(),
+                position,
+                set.taskId(),
+                ids,
+                texts(pieces, piece -> piece.trueState().word()),
+                texts(pieces, NewPiece::defectKind),
+                texts(pieces, SetRows::zone));
     }
 
-    private void inBatches(String sql, List<Object[]> values) {
-        for (int from = 0; from < values.size(); from += BATCH) {
-            template.batchUpdate(sql, values.subList(from, Math.min(values.size(), from + BATCH)));
-        }
+    private static @Nullable String zone(NewPiece piece) {
+        Zone zone = piece.zone();
+        return zone == null ? null : zone.words();
+    }
+
+    private static @Nullable String[] texts(List<NewPiece> pieces, Function<NewPiece, @Nullable String> text) {
+        return pieces.stream().map(text).toArray(String[]::new);
     }
 
     Optional<ReferenceSet> setByCode(SiteId site, String code) {

@@ -8,6 +8,7 @@ import java.sql.Types;
 import java.time.Instant;
 import java.time.LocalDate;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -49,7 +50,7 @@ class StudyRows {
                      where sa.site_id = s.site_id and sa.study_id = s.study_id and sa.appraiser_id = :appraiser))
             """;
 
-    private static final int BATCH = 1000;
+    private static final int BATCH = 10_000;
 
     private final JdbcClient jdbc;
     private final JdbcTemplate template;
@@ -136,12 +137,14 @@ class StudyRows {
     /** Stores which pieces the study names, in the order of the file. */
     void insertPieces(SiteId site, long study, long[] pieceIds) {
         for (int from = 0; from < pieceIds.length; from += BATCH) {
-            List<Object[]> values = new ArrayList<>();
-            for (int i = from; i < Math.min(pieceIds.length, from + BATCH); i++) {
-                values.add(new Object[] {site.value(), study, i, pieceIds[i]});
-            }
-            template.batchUpdate(
-                    "insert into study_piece (site_id, study_id, piece_no, piece_id) values (?, ?, ?, ?)", values);
+            template.update(
+                    """
+                    insert into study_piece (site_id, study_id, piece_no, piece_id)
+                    select ?, ?, ? + place - 1, id from unnest(?) with ordinality as taken (id, place)""",
+                    site.value(),
+                    study,
+                    from,
+                    Arrays.copyOfRange(pieceIds, from, Math.min(pieceIds.length, from + BATCH)));
         }
     }
 

@@ -78,7 +78,8 @@ class ImportController {
             }
             return "redirect:/studies/import/" + kept;
         } catch (Refusal refusal) {
-            response.setStatus(HttpStatus.UNPROCESSABLE_CONTENT.value());
+            boolean tooLarge = refusal.kind() == Refusal.Kind.TOO_LARGE;
+            response.setStatus((tooLarge ? HttpStatus.CONTENT_TOO_LARGE : HttpStatus.UNPROCESSABLE_CONTENT).value());
             model.addAttribute("refusal", refusal);
             return pages.choose(actor, instead, model);
         }

@@ -63,7 +63,7 @@ class ImportRun {
             uploads.end(run, stopping.getAsBoolean() ? Upload.State.BROKEN : Upload.State.CANCELLED, null);
         } catch (Refusal refusal) {
             uploads.end(run, Upload.State.REFUSED, papers.write(ImportProblem.of(refusal)));
-        } catch (IOException | RuntimeException e) {
+        } catch (IOException | RuntimeException | OutOfMemoryError e) {
             LOG.error("The import of upload {} broke off", run.id(), e);
             uploads.end(run, Upload.State.BROKEN, null);
         }
