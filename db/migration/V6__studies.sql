@@ -47,11 +47,11 @@ create table study_piece (
     piece_no int not null check (piece_no >= 0),
     piece_id bigint not null,
     primary key (site_id, study_id, piece_no),
-    unique (site_id, study_id, piece_id),
+    unique (site_id, piece_id, study_id),
     foreign key (site_id, study_id) references study,
     foreign key (site_id, piece_id) references piece
 );
-create index study_piece_by_piece on study_piece (site_id, piece_id, study_id);
+comment on table study_piece is 'of its two keys only the first begins with the study, so that a call''s piece is never sought by the other';
 
 -- The words with which appraisers named what they saw; free, since a wrong name is a finding.
 create table study_seen_kind (
@@ -81,26 +81,32 @@ create function study_call_belongs() returns trigger
     language plpgsql
     set search_path = ${flyway:defaultSchema}, pg_temp
 as $$
+declare
+    stray boolean;
 begin
-    if exists (
+    -- planned anew for each statement: a plan that was good for twenty pieces is kept otherwise, and takes minutes for many
+    execute 'select exists (
         select from (select distinct site_id, study_id, appraiser_no from added) a
          where not exists (
                select from study_appraiser p
-                where p.site_id = a.site_id and p.study_id = a.study_id and p.appraiser_no = a.appraiser_no)) then
+                where p.site_id = a.site_id and p.study_id = a.study_id and p.appraiser_no = a.appraiser_no))' into stray;
+    if stray then
         raise foreign_key_violation using message = 'a call names an appraiser that its study does not have';
     end if;
-    if exists (
+    execute 'select exists (
         select from (select distinct site_id, study_id, piece_no from added) a
          where not exists (
                select from study_piece p
-                where p.site_id = a.site_id and p.study_id = a.study_id and p.piece_no = a.piece_no)) then
+                where p.site_id = a.site_id and p.study_id = a.study_id and p.piece_no = a.piece_no))' into stray;
+    if stray then
         raise foreign_key_violation using message = 'a call names a piece that its study does not have';
     end if;
-    if exists (
+    execute 'select exists (
         select from (select distinct site_id, study_id, kind_no from added where kind_no is not null) a
          where not exists (
                select from study_seen_kind p
-                where p.site_id = a.site_id and p.study_id = a.study_id and p.kind_no = a.kind_no)) then
+                where p.site_id = a.site_id and p.study_id = a.study_id and p.kind_no = a.kind_no))' into stray;
+    if stray then
         raise foreign_key_violation using message = 'a call names a defect kind that its study does not have';
     end if;
     return null;

@@ -13,7 +13,6 @@ import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
-import java.util.Map;
 import javax.sql.DataSource;
 import org.flywaydb.core.Flyway;
 import org.levelgaze.Levelgaze;
@@ -30,7 +29,7 @@ import org.levelgaze.studies.reading.RecordedCalls;
 import org.levelgaze.studies.reading.Watcher;
 import org.postgresql.PGConnection;
 import org.postgresql.copy.CopyManager;
-import org.springframework.boot.builder.SpringApplicationBuilder;
+import org.springframework.boot.SpringApplication;
 import org.springframework.context.ConfigurableApplicationContext;
 
 /**
@@ -68,9 +67,8 @@ public final class ImportAgainstCopy {
         int calls = arguments.length > 0 ? Integer.parseInt(arguments[0]) : 200_000;
         int rounds = arguments.length > 1 ? Integer.parseInt(arguments[1]) : 5;
         Path home = Files.createTempDirectory("levelgaze-bench");
-        try (ConfigurableApplicationContext program = new SpringApplicationBuilder(Levelgaze.class)
-                .properties(Map.of("levelgaze.home", home.resolve("home").toString(), "server.port", "0"))
-                .run()) {
+        try (ConfigurableApplicationContext program = SpringApplication.run(
+                Levelgaze.class, "--levelgaze.home=" + home.resolve("home"), "--server.port=0")) {
             program.getBean(Tasks.class).create(ACTOR, "RIM", "Rim of the bowl", List.of());
             new ImportAgainstCopy(program, calls).run(rounds);
         }
