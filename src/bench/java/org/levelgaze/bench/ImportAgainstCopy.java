@@ -37,40 +37,43 @@ import org.springframework.context.ConfigurableApplicationContext;
  * of the same rows: a raw binary COPY into the same table, with its key and foreign keys, and a raw binary COPY into a table
  * of the same columns without any. The program runs on its own, durable PostgreSQL.
  *
- * <p>Arguments: calls per file (200000), rounds (5). The first round warms up and is not counted.
+ * <p>Arguments: calls per file (200000), rounds (5), pieces of the set that each file brings (1000). The first round warms up
+ * and is not counted. The floors get study, appraisers and pieces for nothing; the import makes a set, too.
  */
 public final class ImportAgainstCopy {
 
     private static final Actor ACTOR = Actor.system(SiteId.MAIN);
     private static final String COLUMNS = "study_id, site_id, appraiser_no, piece_no, trial, kind_no, accepted";
-    private static final int TRIALS = 5;
     private static final int APPRAISERS = 4;
 
     private final StudyImport imports;
     private final DataSource database;
     private final Flyway flyway;
     private final int calls;
+    private final int pieces;
     private final List<Double> importing = new ArrayList<>();
     private final List<Double> reading = new ArrayList<>();
     private final List<Double> constrained = new ArrayList<>();
     private final List<Double> bare = new ArrayList<>();
 
-    private ImportAgainstCopy(ConfigurableApplicationContext program, int calls) {
+    private ImportAgainstCopy(ConfigurableApplicationContext program, int calls, int pieces) {
         this.imports = program.getBean(StudyImport.class);
         this.database = program.getBean(DataSource.class);
         this.flyway = program.getBean(Flyway.class);
         this.calls = calls;
+        this.pieces = pieces;
     }
 
     /** Runs the benchmark and prints the medians as ratios. */
     public static void main(String[] arguments) throws Exception {
         int calls = arguments.length > 0 ? Integer.parseInt(arguments[0]) : 200_000;
         int rounds = arguments.length > 1 ? Integer.parseInt(arguments[1]) : 5;
+        int pieces = arguments.length > 2 ? Integer.parseInt(arguments[2]) : 1_000;
         Path home = Files.createTempDirectory("levelgaze-bench");
-        try (ConfigurableApplicationContext program = SpringApplication.run(
-                Levelgaze.class, "--levelgaze.home=" + home.resolve("home"), "--server.port=0")) {
+        try (ConfigurableApplicationContext program =
+                SpringApplication.run(Levelgaze.class, "--levelgaze.home=" + home.resolve("home"), "--server.port=0")) {
             program.getBean(Tasks.class).create(ACTOR, "RIM", "Rim of the bowl", List.of());
-            new ImportAgainstCopy(program, calls).run(rounds);
+            new ImportAgainstCopy(program, calls, pieces).run(rounds);
         }
     }
 
@@ -84,7 +87,7 @@ public final class ImportAgainstCopy {
             }
         }
         double floor = median(constrained);
-        System.out.printf(Locale.ROOT, "%d calls, %d rounds, medians%n", calls, rounds);
+        System.out.printf(Locale.ROOT, "%d calls on %d pieces, %d rounds, medians%n", calls, pieces, rounds);
         line("raw COPY, same table with its constraints", floor, floor);
         line("raw COPY, no constraints", median(bare), floor);
         line("whole import", median(importing), floor);
@@ -166,9 +169,9 @@ public final class ImportAgainstCopy {
     /** A file that no other round has: its number is written into the labels. */
     private byte[] file(int round) {
         StringBuilder file = new StringBuilder("piece,reference,appraiser,trial,call\n");
-        int pieces = calls / (TRIALS * APPRAISERS);
+        int trials = calls / (pieces * APPRAISERS);
         for (int appraiser = 0; appraiser < APPRAISERS; appraiser++) {
-            for (int trial = 1; trial <= TRIALS; trial++) {
+            for (int trial = 1; trial <= trials; trial++) {
                 for (int piece = 0; piece < pieces; piece++) {
                     boolean defective = piece % 2 == 0;
                     boolean wrong = (piece + 7 * trial + 3 * appraiser) % 11 == 0;
