@@ -22,7 +22,7 @@ class FromAFileToFindingsTest {
         try (Desk desk = plant.engineer()) {
             study = bringTheFile(desk);
             saysWhatTheBookSays(desk);
-            opensTheKeyOnlyAfterAYes(desk, study);
+            opensTheKeyThatTheFileBrought(desk, study);
             sumsUpOnOnePage(desk, study);
             canBeTakenAlong(desk, study);
             desk.press("Sign out");
@@ -68,16 +68,14 @@ class FromAFileToFindingsTest {
                 .contains("70.9 % to 92.8 %", "78.2 % to 96.7 %", "66.3 % to 90 %");
     }
 
-    private static void opensTheKeyOnlyAfterAYes(Desk desk, String study) {
+    /** Whoever brought the file with the true states has seen them, and need not be asked again. */
+    private static void opensTheKeyThatTheFileBrought(Desk desk, String study) {
         desk.follow("Which pieces were miscalled?");
-        assertThat(desk.reads())
-                .contains("This page shows the true state of every piece of BOOK-50, edition 1.")
-                .doesNotContain("let through");
-        desk.press("Open and record it");
         assertThat(desk.path()).isEqualTo(study + "/pieces");
         assertThat(desk.reads()).contains("You count as having seen the answer key of BOOK-50, edition 1");
         desk.open("/sets/BOOK-50");
-        assertThat(desk.reads()).contains("Who has seen the answer key?", "account:1", study + "/pieces");
+        assertThat(desk.reads())
+                .contains("Who has seen the answer key?", "account:1", "a file of calls with true states");
     }
 
     private static void sumsUpOnOnePage(Desk desk, String study) {
