@@ -4,6 +4,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Objects;
 import java.util.function.Function;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
@@ -45,6 +46,16 @@ class Trends {
         this.languages = languages;
     }
 
+    /**
+     * What one appraiser's studies showed at one task.
+     *
+     * @param appraiser whose
+     * @param figures one for each study, the earliest day first
+     * @param sets the codes of the sets that they used, by number
+     * @param words the language in which they are told
+     */
+    private record Trail(Appraiser appraiser, List<Figure> figures, Map<Long, String> sets, Wording words) {}
+
     /** One trend for each task with a concluded study, in the order of the tasks' codes. */
     List<AppraiserPage.TaskTrend> of(Appraiser appraiser, Locale locale) {
         Map<Long, List<Figure>> byTask = studies.figures(appraiser.site(), appraiser.id(), null).stream()
@@ -58,6 +69,7 @@ class Trends {
     private AppraiserPage.TaskTrend trend(Appraiser appraiser, Task task, List<Figure> figures, Locale locale) {
         Wording words = languages.wording(locale);
         Drawing drawing = languages.drawing("t" + task.id(), locale);
+        Trail trail = new Trail(appraiser, figures, codes(appraiser, figures), words);
         Figure newest = figures.get(figures.size() - 1);
         String sentence = words.say(
                 "studies.trend.newest",
@@ -68,42 +80,39 @@ class Trends {
         return new AppraiserPage.TaskTrend(
                 task,
                 sentence,
-                plane(appraiser, figures, words, drawing.named("plane" + task.id())),
-                pictures(appraiser, figures, words, drawing),
+                plane(trail, drawing.named("plane" + task.id())),
+                pictures(trail, drawing),
                 ratios(figures, words));
     }
 
-    private static Picture plane(Appraiser appraiser, List<Figure> figures, Wording words, Drawing drawing) {
-        List<MistakePlane.Study> trail = figures.stream()
+    /** Reads each set once, however many studies used it. */
+    private Map<Long, String> codes(Appraiser appraiser, List<Figure> figures) {
+        return figures.stream()
+                .map(Figure::setId)
+                .distinct()
+                .collect(Collectors.toMap(
+                        id -> id, id -> sets.get(appraiser.site(), id).code()));
+    }
+
+    private static Picture plane(Trail trail, Drawing drawing) {
+        List<MistakePlane.Study> studies = trail.figures().stream()
                 .map(figure -> new MistakePlane.Study(
-                        words.day(figure.performedOn()),
+                        trail.words().day(figure.performedOn()),
                         Estimates.share(Estimates.share(figure.falseReject())),
                         Estimates.share(Estimates.share(figure.falseAccept()))))
                 .toList();
         MistakePlane.Corner corner = new MistakePlane.Corner(LIMITS.maxFalseReject(), LIMITS.maxFalseAccept());
-        return MistakePlane.of(appraiser.name(), trail, corner, drawing);
+        return MistakePlane.of(trail.appraiser().name(), studies, corner, drawing);
     }
 
-    private List<Picture> pictures(Appraiser appraiser, List<Figure> figures, Wording words, Drawing drawing) {
+    private static List<Picture> pictures(Trail trail, Drawing drawing) {
+        List<Trend.Limit> mostAccepts = most(trail.words(), LIMITS.maxFalseAccept());
+        List<Trend.Limit> mostRejects = most(trail.words(), LIMITS.maxFalseReject());
         return List.of(
-                shares("byPiece", Figure::effectiveness, least(words), appraiser, figures, words, drawing),
-                shares(
-                        "falseAccept",
-                        Figure::falseAccept,
-                        most(words, LIMITS.maxFalseAccept()),
-                        appraiser,
-                        figures,
-                        words,
-                        drawing),
-                shares(
-                        "falseReject",
-                        Figure::falseReject,
-                        most(words, LIMITS.maxFalseReject()),
-                        appraiser,
-                        figures,
-                        words,
-                        drawing),
-                picture("c", Trend.Figure.LEAN, Estimates::criterion, List.of(), appraiser, figures, words, drawing));
+                shares("byPiece", Figure::effectiveness, least(trail.words()), trail, drawing),
+                shares("falseAccept", Figure::falseAccept, mostAccepts, trail, drawing),
+                shares("falseReject", Figure::falseReject, mostRejects, trail, drawing),
+                picture("c", Trend.Figure.LEAN, Estimates::criterion, List.of(), trail, drawing));
     }
 
     private static List<Trend.Limit> least(Wording words) {
@@ -114,37 +123,29 @@ class Trends {
         return List.of(new Trend.Limit(words.say("studies.trend.most"), limit, false));
     }
 
-    private Picture shares(
-            String name,
-            Function<Figure, Figure.Count> count,
-            List<Trend.Limit> limits,
-            Appraiser appraiser,
-            List<Figure> figures,
-            Wording words,
-            Drawing drawing) {
+    private static Picture shares(
+            String name, Function<Figure, Figure.Count> count, List<Trend.Limit> limits, Trail trail, Drawing drawing) {
         Function<Figure, Estimate> share = figure -> Estimates.share(Estimates.share(count.apply(figure)));
-        return picture(name, Trend.Figure.SHARE, share, limits, appraiser, figures, words, drawing);
+        return picture(name, Trend.Figure.SHARE, share, limits, trail, drawing);
     }
 
-    private Picture picture(
+    private static Picture picture(
             String name,
             Trend.Figure kind,
             Function<Figure, Estimate> estimate,
             List<Trend.Limit> limits,
-            Appraiser appraiser,
-            List<Figure> figures,
-            Wording words,
+            Trail trail,
             Drawing drawing) {
-        List<Trend.Point> points = figures.stream()
+        List<Trend.Point> points = trail.figures().stream()
                 .map(figure -> new Trend.Point(
                         figure.performedOn(),
-                        words.day(figure.performedOn()),
-                        sets.get(appraiser.site(), figure.setId()).code(),
+                        trail.words().day(figure.performedOn()),
+                        Objects.requireNonNull(trail.sets().get(figure.setId())),
                         estimate.apply(figure)))
                 .toList();
-        String figureName = words.say("studies.term." + name);
+        String figureName = trail.words().say("studies.term." + name);
         return Trend.of(
-                appraiser.name() + ": " + figureName,
+                trail.appraiser().name() + ": " + figureName,
                 kind,
                 figureName,
                 points,
