@@ -10,6 +10,7 @@ import java.util.Locale;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
 import org.levelgaze.shared.RowError;
+import org.levelgaze.studies.SafeCell;
 import org.levelgaze.studies.StudyImport;
 import org.levelgaze.studies.reading.CallReader;
 import org.levelgaze.studies.reading.Reading;
@@ -20,9 +21,6 @@ import org.springframework.stereotype.Component;
 /** Writes all rows that stood in the way of an import as CSV. They are not kept: the file is read once more. */
 @Component
 class BadRowsFile {
-
-    /** What a spreadsheet takes for the beginning of a formula. */
-    private static final String FORMULA_SIGNS = "=+-@\t\r\n";
 
     private final Uploads uploads;
     private final StudyImport imports;
@@ -55,15 +53,9 @@ class BadRowsFile {
     private void print(RowError row, CSVPrinter printer, Locale locale) {
         String sentence = messages.getMessage(row.message(), row.arguments().toArray(), locale);
         try {
-            printer.printRecord(row.row(), safe(row.column()), safe(row.value()), safe(sentence));
+            printer.printRecord(row.row(), SafeCell.of(row.column()), SafeCell.of(row.value()), SafeCell.of(sentence));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
-    }
-
-    /** A text that no spreadsheet takes for a formula. */
-    static String safe(String text) {
-        boolean formula = !text.isEmpty() && FORMULA_SIGNS.indexOf(text.charAt(0)) >= 0;
-        return formula ? "'" + text : text;
     }
 }

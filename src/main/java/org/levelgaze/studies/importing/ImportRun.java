@@ -109,7 +109,9 @@ class ImportRun {
         ImportOutcome outcome = imports.take(actor, order.request(run.fileName()), calls, watcher);
         if (outcome instanceof ImportOutcome.Stored stored) {
             mappings.remember(actor, task, order.mapping());
-            uploads.done(run, stored.study().id());
+            if (!uploads.done(run, stored.study().id())) {
+                throw new CancellationException("A later run of the same upload has taken over");
+            }
         }
         return outcome;
     }

@@ -13,7 +13,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.UUID;
-import java.util.concurrent.CancellationException;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.journal.Actor;
 import org.levelgaze.shared.Refusal;
@@ -229,22 +228,23 @@ class Uploads {
     /**
      * Ends a run with its study and lets the bytes go; part of the study's own transaction.
      *
-     * @throws CancellationException when a later run has taken over: the study must not be stored
+     * @return false when a later run has taken over: the study must not be stored
      */
     @Transactional
-    void done(Upload run, long study) {
+    boolean done(Upload run, long study) {
         int ended = jdbc.sql("update upload set state = 'done', study_id = :study, changed_at = :now" + OF_RUN)
                 .param("study", study)
                 .param("now", Timestamp.from(clock.instant()))
                 .params(ofRun(run))
                 .update();
         if (ended == 0) {
-            throw new CancellationException("A later run of the same upload has taken over");
+            return false;
         }
         jdbc.sql("delete from upload_part where site_id = :site and upload_id = :id")
                 .param("site", run.site().value())
                 .param("id", run.id())
                 .update();
+        return true;
     }
 
     private static Map<String, Object> ofRun(Upload run) {

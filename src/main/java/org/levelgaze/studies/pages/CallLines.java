@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.function.Consumer;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.sets.TrueState;
+import org.levelgaze.studies.SafeCell;
 import org.levelgaze.studies.StoredCall;
 import org.levelgaze.studies.Studies;
 import org.levelgaze.studies.StudyHead;

@@ -11,6 +11,7 @@ import org.levelgaze.agreement.AppraiserFindings;
 import org.levelgaze.agreement.Findings;
 import org.levelgaze.agreement.Interval;
 import org.levelgaze.agreement.Share;
+import org.levelgaze.studies.SafeCell;
 import org.levelgaze.studies.Studies;
 import org.levelgaze.studies.StudyHead;
 import org.springframework.stereotype.Component;
