@@ -8,12 +8,16 @@ import org.levelgaze.shared.TodaySource;
 import org.springframework.jdbc.core.simple.JdbcClient;
 import org.springframework.stereotype.Component;
 
-/** What of the studies needs a hand: one's own imports that wait for a decision, and studies without a conclusion. */
+/** What of the studies needs a hand: one's own imports that wait for a decision, and studies without a conclusion; in an empty installation, the first file. */
 @Component
 class StudiesToday implements TodaySource {
 
     /** More lines of one kind than this nobody reads. */
     private static final int MOST = 20;
+
+    /** Where somebody begins who has nothing yet. */
+    private static final TodayLine FIRST =
+            new TodayLine("studies.today.first", List.of(), "studies.today.first.button", "/studies/import");
 
     private final JdbcClient jdbc;
 
@@ -23,7 +27,16 @@ class StudiesToday implements TodaySource {
 
     @Override
     public List<TodayLine> lines(SiteId site, String who) {
-        return Stream.concat(imports(site, who).stream(), open(site).stream()).toList();
+        List<TodayLine> lines =
+                Stream.concat(imports(site, who).stream(), open(site).stream()).toList();
+        return lines.isEmpty() && !anyStudy(site) ? List.of(FIRST) : lines;
+    }
+
+    private boolean anyStudy(SiteId site) {
+        return jdbc.sql("select exists (select from study where site_id = ?)")
+                .param(site.value())
+                .query(Boolean.class)
+                .single();
     }
 
     private List<TodayLine> imports(SiteId site, String who) {

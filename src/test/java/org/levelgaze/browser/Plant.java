@@ -59,7 +59,8 @@ final class Plant implements AutoCloseable {
             assertThat(desk.reads()).contains("This is not the one-time code.");
             desk.type("One-time code", printed.group(1));
             firstAccount(desk);
-            assertThat(desk.reads()).contains("What needs a hand today?", "A good day.");
+            assertThat(desk.reads())
+                    .contains("What needs a hand today?", "There is no study yet. Bring a file of calls");
         }
     }
 

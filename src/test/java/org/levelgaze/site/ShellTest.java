@@ -59,8 +59,16 @@ class ShellTest {
     }
 
     @Test
-    void anEmptyDayIsAGoodDay() {
+    void anEmptyInstallationSaysWhereToBegin() {
         assertThat(pages.get().uri("/").locale(Locale.ENGLISH))
+                .bodyText()
+                .contains("There is no study yet.", "href=\"/studies/import\"")
+                .doesNotContain("A good day");
+    }
+
+    @Test
+    void anEmptyDayIsAGoodDay() {
+        assertThat(pages.get().uri("/").with(authentication(ana(Role.PROCTOR))).locale(Locale.ENGLISH))
                 .hasStatusOk()
                 .bodyText()
                 .contains("<html lang=\"en\"", "A good day", "Skip to the content", "Ana Reyes", "Sign out")
@@ -69,7 +77,7 @@ class ShellTest {
 
     @Test
     void speaksGermanToABrowserThatAsksForIt() {
-        assertThat(pages.get().uri("/").locale(Locale.GERMANY))
+        assertThat(pages.get().uri("/").with(authentication(ana(Role.PROCTOR))).locale(Locale.GERMANY))
                 .bodyText()
                 .contains("<html lang=\"de\"", "Ein guter Tag");
     }

@@ -119,19 +119,24 @@ class ImportController {
             HttpServletResponse response,
             Locale locale) {
         Upload upload = uploads.get(actor, id);
-        if (upload.running() || upload.studyId() != null) {
+        if (begun(upload)) {
             return "redirect:/studies/import/" + id;
         }
         Sketch sketch = pages.sketch(upload);
         ImportForm form = forms.again(actor, typed, sketch);
         BeanPropertyBindingResult errors = new BeanPropertyBindingResult(form, "form");
         Optional<ImportOrder> order = check.order(actor, form, sketch, errors);
-        if (order.isEmpty()) {
+        if (order.isEmpty() && !begun(uploads.get(actor, id))) {
             response.setStatus(HttpStatus.UNPROCESSABLE_CONTENT.value());
             return pages.form(actor, upload, sketch, errors, model, locale);
         }
-        runs.start(actor, upload, order.get());
+        order.ifPresent(said -> runs.start(actor, upload, said));
         return "redirect:/studies/import/" + id;
+    }
+
+    /** The second of two clicks may find the task that the first has just entered: that is no fault of the form. */
+    private static boolean begun(Upload upload) {
+        return upload.running() || upload.studyId() != null;
     }
 
     @PostMapping("/{id}/away")

@@ -14,6 +14,7 @@ import org.levelgaze.agreement.CohenKappa;
 import org.levelgaze.agreement.Findings;
 import org.levelgaze.agreement.FleissKappa;
 import org.levelgaze.agreement.GwetAC1;
+import org.levelgaze.agreement.Interval;
 import org.levelgaze.agreement.KrippendorffAlpha;
 import org.levelgaze.studies.sentences.Wording;
 
@@ -114,9 +115,14 @@ final class AgreementTables {
         return List.of(
                 name,
                 kappa.kappa() == null ? words.say("studies.undefined") : words.number(kappa.kappa()),
-                words.range(kappa.interval()),
+                words.range(upToOne(kappa.interval())),
                 words.percent(kappa.observedAgreement(), kappa.n()),
                 words.percent(kappa.expectedAgreement(), kappa.n()));
+    }
+
+    /** No kappa exceeds 1, but the normal approximation of its interval may; the files keep it as computed. */
+    private static @Nullable Interval upToOne(@Nullable Interval interval) {
+        return interval == null ? null : new Interval(interval.lower(), Math.min(1, interval.upper()));
     }
 
     private List<String> counts(String name, CallTable table) {
