@@ -47,6 +47,17 @@ final class Desk implements AutoCloseable {
         press("Sign in");
     }
 
+    /** Makes an account with one role, as an administrator does. */
+    void makeAccount(String displayName, String name, String role) {
+        open("/settings/accounts");
+        type("Name", displayName);
+        type("Sign-in name", name);
+        type("First password", Plant.PASSWORD);
+        tick(role);
+        press("Make the account");
+        assertThat(reads()).contains(displayName + " may sign in now.");
+    }
+
     void open(String path) {
         page.navigate(plant.address(path));
         look();

@@ -42,13 +42,7 @@ class ForEverybodyTest {
     @Test
     void aProctorSeesStudiesButNeitherTrueStatesNorTheImport(Plant plant) {
         try (Desk engineer = plant.engineer()) {
-            engineer.open("/settings/accounts");
-            engineer.type("Name", "Pieter Proctor");
-            engineer.type("Sign-in name", "pieter");
-            engineer.type("First password", Plant.PASSWORD);
-            engineer.tick("Proctor");
-            engineer.press("Make the account");
-            assertThat(engineer.reads()).contains("Pieter Proctor may sign in now.");
+            engineer.makeAccount("Pieter Holm", "pieter", "Proctor");
             engineer.open("/studies/import");
             engineer.drop("The file", "role.csv", CallFiles.tenPieces("ROLE-ANA"));
             engineer.press("Look at it");

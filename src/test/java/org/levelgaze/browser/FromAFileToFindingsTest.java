@@ -22,11 +22,15 @@ class FromAFileToFindingsTest {
         try (Desk desk = plant.engineer()) {
             study = bringTheFile(desk);
             saysWhatTheBookSays(desk);
-            opensTheKeyThatTheFileBrought(desk, study);
+            countsTheBringerAmongThoseWhoKnowTheKey(desk, study);
             sumsUpOnOnePage(desk, study);
             canBeTakenAlong(desk, study);
             desk.press("Sign out");
             assertThat(desk.reads()).contains("You are signed out.");
+        }
+        try (Desk auditor = plant.desk()) {
+            auditor.signIn("olga");
+            opensTheKeyOnlyAfterAYes(auditor, study);
         }
         plant.restart();
         try (Desk tomorrow = plant.engineer()) {
@@ -68,14 +72,31 @@ class FromAFileToFindingsTest {
                 .contains("70.9 % to 92.8 %", "78.2 % to 96.7 %", "66.3 % to 90 %");
     }
 
-    /** Whoever brought the file with the true states has seen them, and need not be asked again. */
-    private static void opensTheKeyThatTheFileBrought(Desk desk, String study) {
+    /** Who brought the true states knows them, and the set says so. */
+    private static void countsTheBringerAmongThoseWhoKnowTheKey(Desk desk, String study) {
         desk.follow("Which pieces were miscalled?");
-        assertThat(desk.path()).isEqualTo(study + "/pieces");
         assertThat(desk.reads()).contains("You count as having seen the answer key of BOOK-50, edition 1");
         desk.open("/sets/BOOK-50");
+        assertThat(desk.reads()).contains("Who has seen the answer key?", "account:1");
+        desk.makeAccount("Olga Lund", "olga", "Auditor");
+        desk.open(study);
+    }
+
+    /** Anybody else is asked first, and nothing of the key is shown before the yes. */
+    private static void opensTheKeyOnlyAfterAYes(Desk desk, String study) {
+        desk.open(study);
+        desk.follow("Which pieces were miscalled?");
         assertThat(desk.reads())
-                .contains("Who has seen the answer key?", "account:1", "a file of calls with true states");
+                .contains("This page shows the true state of every piece of BOOK-50, edition 1.")
+                .doesNotContain("True state", "Miscalled");
+        desk.press("Open and record it");
+        assertThat(desk.path()).isEqualTo(study + "/pieces");
+        assertThat(desk.reads())
+                .contains("You count as having seen the answer key of BOOK-50, edition 1", "True state", "Miscalled")
+                .as("pieces 6, 21, 22 and 34 are called wrongly most often, in 4 of 9 calls: counted from the file")
+                .containsSubsequence("\n6\n", "\n21\n", "\n22\n", "\n34\n", "4 of 9");
+        desk.open("/sets/BOOK-50");
+        assertThat(desk.reads()).contains(study + "/pieces");
     }
 
     private static void sumsUpOnOnePage(Desk desk, String study) {
