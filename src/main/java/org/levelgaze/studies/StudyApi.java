@@ -12,9 +12,12 @@ import java.time.Instant;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import org.levelgaze.journal.Actor;
+import org.levelgaze.register.Appraiser;
 import org.levelgaze.register.Appraisers;
 import org.levelgaze.register.Tasks;
 import org.levelgaze.sets.ReferenceSets;
@@ -108,7 +111,7 @@ class StudyApi {
         StudyRequest request = new StudyRequest(task, set, performedOn, configuration, conclude, "", consent);
         StudyHead stored = stored(request, imports.take(actor, request, calls, Watcher.NONE));
         return ResponseEntity.created(URI.create("/api/v1/studies/" + stored.id()))
-                .body(answer(studies.get(actor.site(), stored.id())));
+                .body(new Answers().of(studies.get(actor.site(), stored.id())));
     }
 
     @Operation(summary = "The studies, the latest day first")
@@ -127,13 +130,13 @@ class StudyApi {
         List<StudyHead> page = found.subList(0, Math.min(size, found.size()));
         String next =
                 found.size() > size ? StudyCursor.after(page.get(size - 1)).text() : null;
-        return new Listing<>(page.stream().map(this::answer).toList(), next);
+        return new Listing<>(page.stream().map(new Answers()::of).toList(), next);
     }
 
     @Operation(summary = "One study, without its calls")
     @GetMapping("/{id}")
     StudyAnswer read(Actor actor, @PathVariable long id) {
-        return answer(studies.get(actor.site(), id));
+        return new Answers().of(studies.get(actor.site(), id));
     }
 
     /** The findings to the letter as they were stored. */
@@ -187,34 +190,46 @@ class StudyApi {
                 Refusal.Kind.INVALID, "unknown-defect-kinds", String.join(", ", asked.unknownKinds()), request.task());
     }
 
-    private StudyAnswer answer(StudyHead study) {
-        List<ParticipantAnswer> taking = new ArrayList<>();
-        study.appraisers().forEach(one -> taking.add(participant(study, one)));
-        return new StudyAnswer(
-                study.id(),
-                tasks.get(study.site(), study.taskId()).code(),
-                sets.get(study.site(), study.setId()).code(),
-                study.edition(),
-                study.performedOn(),
-                study.pieces(),
-                study.calls(),
-                study.callsMissing(),
-                study.recordedAt(),
-                study.concludedAt(),
-                taking,
-                study.callsMissing() == 0 ? List.of() : List.of(study.callsMissing() + " calls missing in the file"));
-    }
+    /** Words studies for one answer; what several of them share is read once. */
+    private final class Answers {
 
-    private ParticipantAnswer participant(StudyHead study, StudyHead.Participant one) {
-        var appraiser = appraisers.get(study.site(), one.appraiserId());
-        Integer number = one.configuration();
-        String label = number == null
-                ? null
-                : appraiser.configurations().stream()
-                        .filter(configuration -> configuration.number() == number)
-                        .findFirst()
-                        .orElseThrow()
-                        .label();
-        return new ParticipantAnswer(appraiser.code(), label, one.trials());
+        private final Map<Long, String> taskCodes = new HashMap<>();
+        private final Map<Long, String> setCodes = new HashMap<>();
+        private final Map<Long, Appraiser> taking = new HashMap<>();
+
+        StudyAnswer of(StudyHead study) {
+            List<ParticipantAnswer> answers = new ArrayList<>();
+            study.appraisers().forEach(one -> answers.add(participant(study, one)));
+            return new StudyAnswer(
+                    study.id(),
+                    taskCodes.computeIfAbsent(
+                            study.taskId(), id -> tasks.get(study.site(), id).code()),
+                    setCodes.computeIfAbsent(
+                            study.setId(), id -> sets.get(study.site(), id).code()),
+                    study.edition(),
+                    study.performedOn(),
+                    study.pieces(),
+                    study.calls(),
+                    study.callsMissing(),
+                    study.recordedAt(),
+                    study.concludedAt(),
+                    answers,
+                    study.callsMissing() == 0
+                            ? List.of()
+                            : List.of(study.callsMissing() + " calls missing in the file"));
+        }
+
+        private ParticipantAnswer participant(StudyHead study, StudyHead.Participant one) {
+            Appraiser appraiser = taking.computeIfAbsent(one.appraiserId(), id -> appraisers.get(study.site(), id));
+            Integer number = one.configuration();
+            String label = number == null
+                    ? null
+                    : appraiser.configurations().stream()
+                            .filter(configuration -> configuration.number() == number)
+                            .findFirst()
+                            .orElseThrow()
+                            .label();
+            return new ParticipantAnswer(appraiser.code(), label, one.trials());
+        }
     }
 }
