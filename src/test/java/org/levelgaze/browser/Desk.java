@@ -183,6 +183,7 @@ final class Desk implements AutoCloseable {
 
     /** The rules for everybody's access, once for each kind of page; a page that changes by itself is left alone. */
     private void look() {
+        page.waitForLoadState();
         if (page.locator("progress").count() > 0) {
             return;
         }
