@@ -4,11 +4,11 @@ import java.time.Clock;
 import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
-import java.util.regex.Pattern;
 import org.levelgaze.journal.Act;
 import org.levelgaze.journal.Actor;
 import org.levelgaze.journal.Journal;
 import org.levelgaze.register.Task;
+import org.levelgaze.shared.CodeRule;
 import org.levelgaze.shared.Refusal;
 import org.levelgaze.shared.SiteId;
 import org.levelgaze.shared.Sites;
@@ -18,10 +18,6 @@ import org.springframework.transaction.annotation.Transactional;
 /** The reference sets of a site and their editions. */
 @Service
 public class ReferenceSets {
-
-    private static final int LONGEST_CODE = 100;
-    /** Control characters, and what would mean something else in an address. */
-    private static final Pattern NOT_USABLE = Pattern.compile("\\p{Cntrl}|;|^\\.{1,2}$");
 
     private final SetRows rows;
     private final Journal journal;
@@ -127,10 +123,8 @@ public class ReferenceSets {
     }
 
     private void checkCode(SiteId site, String code) {
-        if (code.isBlank()
-                || code.length() > LONGEST_CODE
-                || NOT_USABLE.matcher(code).find()) {
-            throw new Refusal(Refusal.Kind.INVALID, "set-code-not-usable", code, LONGEST_CODE);
+        if (!CodeRule.isUsable(code)) {
+            throw new Refusal(Refusal.Kind.INVALID, "set-code-not-usable", code, CodeRule.LONGEST);
         }
         if (rows.setByCode(site, code).isPresent()) {
             throw new Refusal(Refusal.Kind.CONFLICT, "set-exists", code);
